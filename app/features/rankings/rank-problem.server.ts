@@ -1,0 +1,124 @@
+import { and, desc, eq } from "drizzle-orm";
+import { db } from "@/app/platform/db.server";
+import { curvePoints } from "@/benchmarks/convergence/nodes-for-tolerance";
+import { solvers, solverVersions, studies, submissions, teams } from "@/drizzle/schema";
+import type { Viewer } from "../accounts/viewer";
+import { findRevision } from "../problems/find-revision.server";
+import { rankStudies, compareSortKeys, sortKeyOf, type NotReached, type Reached } from "./rank-studies";
+import type { NotReachedRow, RankedSubmission, Ranking, RankingCurve, RankingRow } from "./ranking";
+import { decodeCursor, encodeCursor } from "./ranking-cursor.server";
+import { matchesFilter } from "./ranking-filter";
+import type { RankingQuery } from "./ranking-query";
+
+const mostNotReached = 200;
+const mostCurves = 200;
+const samplesPerCurve = 96;
+
+/** The listed submissions of a problem's current revision, ranked at a tolerance from their stored studies. */
+export async function rankProblem(_viewer: Viewer, slug: string, query: RankingQuery): Promise<Ranking> {
+  const revision = await findRevision(slug, null);
+  const candidates = await loadCandidates(revision.revisionId, query);
+  // Ranks are among all; the filter only chooses what is shown.
+  const all = rankStudies(candidates, query.tolerance, query.by);
+  const reached = all.reached.filter((row) => matchesFilter(row.candidate, query));
+  const notReached = all.notReached.filter((row) => matchesFilter(row.candidate, query));
+  const start = query.cursor === null ? 0 : positionAfter(reached, query.cursor);
+  const page = reached.slice(start, start + query.limit);
+  const hasMore = start + page.length < reached.length;
+  return {
+    problem: { slug: revision.slug, code: revision.code, title: revision.definition.title },
+    revision: revision.number,
+    tolerance: query.tolerance,
+    norm: query.norm,
+    measure: query.measure,
+    by: query.by,
+    rows: page.map((row, index) => toRow(row, start + index + 1)),
+    notReached: notReached.slice(0, mostNotReached).map(toNotReachedRow),
+    total: reached.length,
+    nextCursor: hasMore ? encodeCursor(sortKeyOf(page[page.length - 1])) : null,
+    curves: [...reached, ...notReached].slice(0, mostCurves).map(({ candidate }) => toCurve(candidate)),
+  };
+}
+
+type Listed = Awaited<ReturnType<typeof loadCandidates>>[number];
+
+async function loadCandidates(revisionId: string, { norm, measure }: RankingQuery) {
+  const rows = await db
+    .selectDistinctOn([studies.submissionId], {
+      submissionId: submissions.id,
+      recordNumber: submissions.recordNumber,
+      recordVersion: submissions.recordVersion,
+      solver: { slug: solvers.slug, name: solvers.name },
+      version: solverVersions.version,
+      team: { slug: teams.slug, name: teams.name, isHouse: teams.isHouse },
+      family: solvers.family,
+      method: solvers.method,
+      declaration: submissions.declaration,
+      handedInAt: submissions.handedInAt,
+      createdAt: submissions.createdAt,
+      study: studies.study,
+    })
+    .from(submissions)
+    .innerJoin(
+      studies,
+      and(
+        eq(studies.submissionId, submissions.id),
+        eq(studies.problemRevisionId, submissions.problemRevisionId),
+        eq(studies.norm, norm),
+        eq(studies.measure, measure),
+      ),
+    )
+    .innerJoin(solverVersions, eq(solverVersions.id, submissions.solverVersionId))
+    .innerJoin(solvers, eq(solvers.id, solverVersions.solverId))
+    .innerJoin(teams, eq(teams.id, submissions.teamId))
+    .where(and(eq(submissions.problemRevisionId, revisionId), eq(submissions.state, "listed")))
+    // Of several scorer versions the latest study counts.
+    .orderBy(studies.submissionId, desc(studies.createdAt));
+  return rows.map((row) => ({ ...row, handedInAt: row.handedInAt ?? row.createdAt }));
+}
+
+function positionAfter(rows: Reached<Listed>[], cursor: string): number {
+  const key = decodeCursor(cursor);
+  const next = rows.findIndex((row) => compareSortKeys(sortKeyOf(row), key) > 0);
+  return next === -1 ? rows.length : next;
+}
+
+function toRanked({ study, declaration, recordNumber, recordVersion, ...row }: Listed): RankedSubmission {
+  return {
+    submissionId: row.submissionId,
+    // The database holds that a listed submission has both.
+    record: { number: recordNumber ?? 0, version: recordVersion ?? 0 },
+    solver: row.solver,
+    version: row.version,
+    team: row.team,
+    family: row.family,
+    method: row.method,
+    claim: declaration.claim,
+    formalOrder: declaration.claim.kind === "algebraic" ? declaration.claim.order : null,
+    precision: declaration.precision,
+    observed: { kind: study.kind, order: study.order, rate: study.rate, verdict: study.verdict },
+    tail: study.tail,
+  };
+}
+
+function toRow(
+  { candidate, rank, isTied, reading, unknowns }: Reached<Listed>,
+  position: number,
+): RankingRow {
+  const { nodes, n, atMost, errorAtReading, cost } = reading;
+  return { ...toRanked(candidate), rank, isTied, position, nodes, n, atMost, errorAtReading, unknowns, cost };
+}
+
+function toNotReachedRow({ candidate, smallestError, reason, at }: NotReached<Listed>): NotReachedRow {
+  return { ...toRanked(candidate), smallestError, reason, at };
+}
+
+function toCurve({ submissionId, solver, version, family, study }: Listed): RankingCurve {
+  return {
+    submissionId,
+    label: `${solver.name} ${version}`,
+    family,
+    points: study.points.map(({ n, nodes, intervals, error }) => ({ n, nodes, intervals, error })),
+    line: curvePoints(study, samplesPerCurve),
+  };
+}
