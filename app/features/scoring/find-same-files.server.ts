@@ -2,10 +2,8 @@ import { and, asc, eq, inArray, ne } from "drizzle-orm";
 import { db } from "@/app/platform/db.server";
 import type { Finding } from "@/benchmarks/scoring/result";
 import { files, runs, submissions } from "@/drizzle/schema";
+import { sameFileCode } from "./same-file-code";
 import type { StoredStudy } from "./stored-study.server";
-
-/** The code by which readers know that `figures.submission` names another submission, which they may not see. */
-export const sameFileCode = "same-file-elsewhere";
 
 /** One finding for each run whose bytes belong to another submission too. */
 export async function findSameFiles(study: StoredStudy): Promise<Finding[]> {

@@ -1,0 +1,49 @@
+import { and, eq } from "drizzle-orm";
+import { db } from "@/app/platform/db.server";
+import { publish } from "@/app/platform/events.server";
+import { conflict, forbidden } from "@/app/platform/errors";
+import type { SubmissionState } from "@/drizzle/enums";
+import { decisions, marks, submissions } from "@/drizzle/schema";
+import type { Viewer } from "../accounts/viewer";
+import { requireVerified } from "../accounts/viewer-policy";
+import { requireNote } from "../moderation/decision-form";
+import { recordAuditEvent } from "../moderation/record-audit-event.server";
+import { findGuarded } from "./find-guarded.server";
+import { canWithdraw } from "./submission-policy";
+
+/** Takes a record out of the rankings; its page stays, with the note as its notice. */
+export async function withdrawSubmission(
+  viewer: Viewer,
+  input: { id: string; note: string },
+): Promise<{ id: string; state: SubmissionState }> {
+  const guarded = await findGuarded(viewer, input.id);
+  const account = requireVerified(viewer);
+  const note = requireNote(input.note);
+  if (!canWithdraw(viewer, { ...guarded, state: "listed" })) {
+    throw forbidden("Only the team of a record and admins can withdraw it.");
+  }
+  return await db.transaction(async (tx) => {
+    const [withdrawn] = await tx
+      .update(submissions)
+      .set({ state: "withdrawn" })
+      .where(and(eq(submissions.id, guarded.id), eq(submissions.state, "listed")))
+      .returning({ id: submissions.id, state: submissions.state });
+    if (!withdrawn) throw conflict("Only a listed record can be withdrawn.");
+    await tx.update(marks).set({ isListed: false }).where(eq(marks.submissionId, guarded.id));
+    await tx.insert(decisions).values({
+      submissionId: guarded.id,
+      kind: "withdraw",
+      note,
+      decidedById: account.userId,
+    });
+    await recordAuditEvent(tx, {
+      actorId: account.userId,
+      action: "submission.withdraw",
+      subjectKind: "submission",
+      subjectId: guarded.id,
+      detail: { note },
+    });
+    await publish(tx, { submissionId: guarded.id, kind: "state", state: withdrawn.state });
+    return withdrawn;
+  });
+}
