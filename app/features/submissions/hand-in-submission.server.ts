@@ -15,8 +15,8 @@ export async function handInSubmission(
   viewer: Viewer,
   id: string,
 ): Promise<{ id: string; state: SubmissionState }> {
-  const guarded = await findGuarded(viewer, id);
   const account = requireSubmitter(viewer);
+  const guarded = await findGuarded(viewer, id);
   if (!isOwnTeam(viewer, guarded)) throw notFound("The submission");
   return await db.transaction(async (tx) => {
     const [handedIn] = await tx

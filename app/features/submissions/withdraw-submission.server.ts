@@ -16,8 +16,8 @@ export async function withdrawSubmission(
   viewer: Viewer,
   input: { id: string; note: string },
 ): Promise<{ id: string; state: SubmissionState }> {
-  const guarded = await findGuarded(viewer, input.id);
   const account = requireVerified(viewer);
+  const guarded = await findGuarded(viewer, input.id);
   const note = requireNote(input.note);
   if (!canWithdraw(viewer, { ...guarded, state: "listed" })) {
     throw forbidden("Only the team of a record and admins can withdraw it.");
