@@ -27,6 +27,8 @@ export interface RunScore {
   unknowns: number;
   /** Intervals that refinement divides: geometric mean over the axes. */
   intervals: number;
+  /** Intervals along each axis. */
+  axisIntervals: number[];
   times: TimeScore[];
   /** Integral of u minus integral of u*, and the same over the integral of |u*|. */
   massDefect: number | null;
@@ -36,6 +38,11 @@ export interface RunScore {
   takacs: { dissipation: number; dispersion: number; meanSquare: number } | null;
   /** Largest |u*| on the nodes at the last time. */
   exactMax: number;
+  /** Largest error in the outer tenth of the domain and in the rest, at the last time. */
+  maxNearEnds: number | null;
+  maxInside: number | null;
+  /** The problem's functional of u and of u* on the run's grid; null for complex data. */
+  functional: { value: number; exact: number } | null;
   /** Facts about the file that findings rest on. */
   reading: RunReading;
 }
@@ -49,20 +56,29 @@ export interface RunReading {
   hadRepeatedEnd: boolean;
   /** float64 data that hold only float32 values. */
   holdsSinglePrecisionOnly: boolean;
+  /** Most significant decimal digits that any value carries; null where some value needs more than 8. */
+  significantDigits: number | null;
+  /** Largest error over the largest |u*|; below 8 eps the run equals the exact solution at its nodes. */
+  errorOverMax: number;
+  /** Error of the interpolant of u* on these nodes, relative to max |u*|; only where the run equals u*. */
+  interpolantError: number | null;
+  /** Relative L2 error when read as n - 1 intervals with both ends as nodes; periodic axes only. */
+  endIncludedError: number | null;
+  /** Relative L2 error with the axes exchanged; 2-D with as many nodes on both axes only. */
+  transposedError: number | null;
+  /** The shift of the output time that makes the error smallest, and by what factor; unsteady problems only. */
+  timeShift: { shift: number; factor: number } | null;
+  /** A listed grid's largest gap, in units of L/N; null for other kinds. */
+  largestGap: number | null;
+  /** Values at every `strides`-th node, for comparing runs at the nodes they share. */
+  sample: { strides: number[]; values: number[] } | null;
 }
 
 export type RelativeNormName = "relL1" | "relL2" | "relMax";
 export type MeasureName = "nodes" | "between";
 
 export type StudyKind = "algebraic" | "exponential" | "mixed" | "undecided" | "floor" | "none";
-export type Verdict =
-  | "confirmed"
-  | "near"
-  | "below"
-  | "above"
-  | "notExponential"
-  | "undecidable"
-  | "none";
+export type Verdict = "confirmed" | "near" | "below" | "above" | "notExponential" | "undecidable" | "none";
 
 export interface StudyTail {
   kind: "floor" | "stall" | "floorOrStall" | "short";
@@ -75,7 +91,10 @@ export interface StudyTail {
 export interface StudyPoint {
   n: number[];
   nodes: number;
+  /** Geometric mean of `axisIntervals`. */
   intervals: number;
+  /** Intervals along each axis. */
+  axisIntervals: number[];
   error: number;
   unknowns: number;
   wallSeconds: number | null;
@@ -104,6 +123,31 @@ export interface Study {
   leadingCoefficient: number | null;
   /** At 10^(-k/2), k = 0..28, as far as the study reaches. */
   marks: Mark[];
+  /** Of the problem's functional on the three finest runs; null where there are fewer or it does not apply. */
+  gridConvergence: GridConvergence | null;
+  /** Share of the error that is not spatial, from runs of roles `timeStep` and `iteration`. */
+  ladders: LadderShare[];
+}
+
+/** The grid convergence index (Celik et al. 2008) beside the true error. */
+export interface GridConvergence {
+  /** Apparent order; null where the index is undefined, as for values that do not differ. */
+  order: number | null;
+  extrapolated: number | null;
+  /** Relative uncertainty of the finest value. */
+  index: number | null;
+  /** Relative error of the finest value against the exact functional. */
+  trueError: number | null;
+  /** The index is at least the true error. */
+  isCovered: boolean | null;
+}
+
+/** What a ladder in time or iteration shows on one grid. */
+export interface LadderShare {
+  role: "timeStep" | "iteration";
+  n: number[];
+  /** Largest change of the error along the ladder, over the study run's error. */
+  share: number;
 }
 
 export interface Finding {
