@@ -1,5 +1,6 @@
-import { publicStates, type ApiScope, type SubmissionState } from "@/drizzle/enums";
+import { publicStates, type SubmissionState } from "@/drizzle/enums";
 import type { Viewer } from "../accounts/viewer";
+import { hasRole, hasScope, isMember } from "../accounts/viewer-policy";
 import type { SubmissionPermissions } from "./submission-view";
 
 /** What the rules below need to know of a submission. */
@@ -13,12 +14,7 @@ export function isPublic(state: SubmissionState): boolean {
 }
 
 export function isOwnTeam(viewer: Viewer, submission: GuardedSubmission): boolean {
-  return viewer !== null && viewer.teams.some((team) => team.id === submission.teamId);
-}
-
-/** A token must have been given the scope; a browser session has them all. */
-function hasScope(viewer: NonNullable<Viewer>, scope: ApiScope): boolean {
-  return viewer.scopes === null || viewer.scopes.includes(scope);
+  return isMember(viewer, submission.teamId);
 }
 
 /** Private to the team and admins before it is listed; maintainers see what is handed in for review. */
@@ -28,13 +24,13 @@ export function canSee(viewer: Viewer, submission: GuardedSubmission): boolean {
   // A CI job's token that may only submit still follows its own submission.
   if (isOwnTeam(viewer, submission)) return hasScope(viewer, "read") || hasScope(viewer, "submit");
   if (!hasScope(viewer, "read") && !hasScope(viewer, "review")) return false;
-  return viewer.role === "admin" || (viewer.role === "maintainer" && submission.state === "inReview");
+  return hasRole(viewer, "admin") || (hasRole(viewer, "maintainer") && submission.state === "inReview");
 }
 
 /** A withdrawn record keeps its page, figures and checksums; the files go back to the team. */
 export function canDownload(viewer: Viewer, submission: GuardedSubmission): boolean {
   if (submission.state !== "withdrawn") return canSee(viewer, submission);
-  return viewer !== null && (viewer.role === "admin" || isOwnTeam(viewer, submission));
+  return hasRole(viewer, "admin") || isOwnTeam(viewer, submission);
 }
 
 export function canHandIn(viewer: Viewer, submission: GuardedSubmission): boolean {
@@ -44,13 +40,13 @@ export function canHandIn(viewer: Viewer, submission: GuardedSubmission): boolea
 
 /** Nobody decides on a submission of their own team. */
 export function canDecide(viewer: Viewer, submission: GuardedSubmission): boolean {
-  if (viewer === null || viewer.role !== "admin" || !hasScope(viewer, "review")) return false;
+  if (!hasRole(viewer, "admin") || !hasScope(viewer, "review")) return false;
   return !isOwnTeam(viewer, submission) && submission.state === "inReview";
 }
 
 export function canWithdraw(viewer: Viewer, submission: GuardedSubmission): boolean {
   if (viewer === null || submission.state !== "listed") return false;
-  if (viewer.role === "admin" && hasScope(viewer, "review")) return true;
+  if (hasRole(viewer, "admin") && hasScope(viewer, "review")) return true;
   return isOwnTeam(viewer, submission) && viewer.isEmailVerified && hasScope(viewer, "submit");
 }
 
