@@ -37,19 +37,19 @@ export interface FieldFile {
 export interface ReadLimits {
   /** Bytes of the file as sent. */
   maxBytes: number;
-  /** Bytes of all its arrays once unpacked, counted as stored in the file. */
+  /** Bytes of all its arrays once unpacked, counted as stored and again in double precision. */
   maxUnpackedBytes: number;
-  /** Values of one array at one output time, which is nodes of the grid. */
+  /** Values of one array, all its output times together. The scorer holds the nodes of one time to its own limit. */
   maxNodes: number;
 }
 
 /**
- * Limits of an ordinary submission: 64 MiB a file, 256 MiB unpacked, 2^22 nodes.
+ * Limits of an ordinary submission: 64 MiB a file, 256 MiB unpacked, 2^24 values an array.
  *
  * @example readFieldFile("n64.npy", bytes, defaultLimits)
  */
 export const defaultLimits: ReadLimits = {
   maxBytes: 64 * 2 ** 20,
   maxUnpackedBytes: 256 * 2 ** 20,
-  maxNodes: 2 ** 22,
+  maxNodes: 2 ** 24,
 };
