@@ -1,0 +1,40 @@
+import { advectionDiffusionGaussian } from "./advection-diffusion-gaussian";
+import { advectionExpSine } from "./advection-exp-sine";
+import { boundaryLayer } from "./boundary-layer";
+import { burgersPeriodic } from "./burgers-periodic";
+import type { ProblemDefinition } from "./definition";
+import { heatDirichlet } from "./heat-dirichlet";
+import { heatNeumannRobin } from "./heat-neumann-robin";
+import { helmholtzPeriodic2d } from "./helmholtz-periodic-2d";
+import { nonlinearDiffusivity } from "./nonlinear-diffusivity";
+import { poissonMixed2d } from "./poisson-mixed-2d";
+
+/** The test problems that ship with the register, periodic ones first, by their codes. */
+export const shippedProblems: ProblemDefinition[] = [
+  advectionExpSine,
+  advectionDiffusionGaussian,
+  burgersPeriodic,
+  helmholtzPeriodic2d,
+  nonlinearDiffusivity,
+  heatDirichlet,
+  heatNeumannRobin,
+  boundaryLayer,
+  poissonMixed2d,
+];
+
+/**
+ * The shipped problem of a slug.
+ *
+ * @param slug for example "advection-exp-sine"
+ * @returns the definition, shared and not to be changed
+ * @throws RangeError where no shipped problem has the slug
+ * @example shippedProblem("heat-dirichlet").outputTimes // [0.1]
+ */
+export function shippedProblem(slug: string): ProblemDefinition {
+  const problem = shippedProblems.find((candidate) => candidate.slug === slug);
+  if (!problem) {
+    const known = shippedProblems.map((candidate) => candidate.slug).join(", ");
+    throw new RangeError(`no shipped problem has the slug "${slug}"; there are ${known}`);
+  }
+  return problem;
+}
