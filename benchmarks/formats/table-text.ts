@@ -67,7 +67,9 @@ function decodeUtf8(bytes: Uint8Array): string {
     if (isUtf8(bytes.subarray(0, middle), true)) good = middle;
     else bad = middle;
   }
-  const found = good < bytes.length ? `0x${bytes[good].toString(16).padStart(2, "0")}` : "the file's end";
+  // The first bytes of a broken character can still be the start of one: its place is where it begins.
+  while (!isUtf8(bytes.subarray(0, good))) good--;
+  const found = `0x${bytes[good].toString(16).padStart(2, "0")}`;
   throw new DataError(
     "format/not-utf8",
     `The table is not UTF-8 text: ${found} at byte ${good} belongs to no character. Save it as UTF-8.`,
