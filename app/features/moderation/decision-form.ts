@@ -8,6 +8,9 @@ export const decisionForm = z.object({
   note: z.string(noteSentence).trim().min(1, noteSentence).max(4000, noteSentence),
 });
 
+/** A call's body: whether its note will do is asked after who calls. */
+export const decisionBody = z.object({ note: z.string().default("") });
+
 export function requireNote(note: unknown): string {
   const parsed = decisionForm.safeParse({ note });
   if (!parsed.success) throw invalid("A decision needs a note.", { note: noteSentence });

@@ -17,8 +17,8 @@ export async function listSubmission(
   viewer: Viewer,
   input: { id: string; note: string },
 ): Promise<{ id: string; record: RecordAddress }> {
-  const note = requireNote(input.note);
   const { account, guarded } = await requireDecider(viewer, input.id);
+  const note = requireNote(input.note);
   return await db.transaction(async (tx) => {
     const lineage = await lockLineage(tx, guarded.id);
     const record = await nextRecord(tx, lineage);

@@ -14,8 +14,8 @@ export async function returnSubmission(
   viewer: Viewer,
   input: { id: string; note: string },
 ): Promise<{ id: string; state: SubmissionState }> {
-  const note = requireNote(input.note);
   const { account, guarded } = await requireDecider(viewer, input.id);
+  const note = requireNote(input.note);
   return await db.transaction(async (tx) => {
     const [returned] = await tx
       .update(submissions)

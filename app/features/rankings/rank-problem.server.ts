@@ -101,11 +101,8 @@ function toRanked({ study, declaration, recordNumber, recordVersion, ...row }: L
   };
 }
 
-function toRow(
-  { candidate, rank, isTied, reading, unknowns }: Reached<Listed>,
-  position: number,
-): RankingRow {
-  const { nodes, n, atMost, errorAtReading, cost } = reading;
+function toRow({ candidate, rank, isTied, reading }: Reached<Listed>, position: number): RankingRow {
+  const { nodes, n, atMost, errorAtReading, unknowns, cost } = reading;
   return { ...toRanked(candidate), rank, isTied, position, nodes, n, atMost, errorAtReading, unknowns, cost };
 }
 

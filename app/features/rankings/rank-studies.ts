@@ -1,7 +1,6 @@
 import { nodesForTolerance, type Reading } from "@/benchmarks/convergence/nodes-for-tolerance";
 import type { Study } from "@/benchmarks/scoring/result";
 import type { RankBy } from "./ranking-query";
-import { unknownsAtReading } from "./unknowns-at-reading";
 
 /** What ordering needs to know of one listed submission. */
 export interface Candidate {
@@ -15,7 +14,6 @@ export interface Reached<C extends Candidate> {
   rank: number;
   isTied: boolean;
   reading: Extract<Reading, { kind: "reached" }>;
-  unknowns: number;
   /** What is ranked by: nodes, unknowns or declared seconds. */
   value: number;
 }
@@ -61,8 +59,7 @@ export function rankStudies<C extends Candidate>(
       notReached.push({ candidate, smallestError, reason, at });
       continue;
     }
-    const unknowns = unknownsAtReading(candidate.study, reading);
-    const value = by === "nodes" ? reading.nodes : by === "unknowns" ? unknowns : reading.cost;
+    const value = reading[by];
     if (value === null) {
       notReached.push({
         candidate,
@@ -71,7 +68,7 @@ export function rankStudies<C extends Candidate>(
         at: reading.n,
       });
     } else {
-      reached.push({ candidate, rank: 0, isTied: false, reading, unknowns, value });
+      reached.push({ candidate, rank: 0, isTied: false, reading, value });
     }
   }
   reached.sort((a, b) => compareSortKeys(sortKeyOf(a), sortKeyOf(b)));
