@@ -2,9 +2,9 @@
 
 import { DataError } from "../scoring/data-error";
 
+import { isHostLittleEndian } from "./host-byte-order";
 import type { NumberType } from "./number-type";
 
-const isHostLittleEndian = new Uint8Array(Uint32Array.of(1).buffer)[0] === 1;
 const twoTo32 = 2 ** 32;
 const twoTo21 = 2 ** 21;
 

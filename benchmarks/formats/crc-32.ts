@@ -1,5 +1,7 @@
 /** The checksum that zip archives carry for every entry. */
 
+import { isHostLittleEndian } from "./host-byte-order";
+
 const tableCount = 8;
 const tables = makeTables();
 
@@ -14,22 +16,33 @@ const tables = makeTables();
  */
 export function crc32(bytes: Uint8Array): number {
   const [t0, t1, t2, t3, t4, t5, t6, t7] = tables;
-  let sum = 0xffffffff;
-  let i = 0;
-  for (; i + 8 <= bytes.length; i += 8) {
-    sum ^= bytes[i] | (bytes[i + 1] << 8) | (bytes[i + 2] << 16) | (bytes[i + 3] << 24);
+  // Whole words are read where words may begin; the bytes before and after go one by one.
+  const from = Math.min(bytes.length, -bytes.byteOffset & 3);
+  const wordCount = isHostLittleEndian ? 2 * ((bytes.length - from) >> 3) : 0;
+  const words =
+    wordCount > 0 ? new Int32Array(bytes.buffer, bytes.byteOffset + from, wordCount) : new Int32Array(0);
+  let sum = sumBytes(-1, bytes, 0, from);
+  for (let k = 0; k < wordCount; k += 2) {
+    const low = words[k] ^ sum;
+    const high = words[k + 1];
     sum =
-      t7[sum & 255] ^
-      t6[(sum >>> 8) & 255] ^
-      t5[(sum >>> 16) & 255] ^
-      t4[sum >>> 24] ^
-      t3[bytes[i + 4]] ^
-      t2[bytes[i + 5]] ^
-      t1[bytes[i + 6]] ^
-      t0[bytes[i + 7]];
+      t7[low & 255] ^
+      t6[(low >>> 8) & 255] ^
+      t5[(low >>> 16) & 255] ^
+      t4[low >>> 24] ^
+      t3[high & 255] ^
+      t2[(high >>> 8) & 255] ^
+      t1[(high >>> 16) & 255] ^
+      t0[high >>> 24];
   }
-  for (; i < bytes.length; i++) sum = t0[(sum ^ bytes[i]) & 255] ^ (sum >>> 8);
-  return ~sum >>> 0;
+  return ~sumBytes(sum, bytes, from + 4 * wordCount, bytes.length) >>> 0;
+}
+
+function sumBytes(start: number, bytes: Uint8Array, from: number, to: number): number {
+  const [table] = tables;
+  let sum = start;
+  for (let i = from; i < to; i++) sum = table[(sum ^ bytes[i]) & 255] ^ (sum >>> 8);
+  return sum;
 }
 
 function makeTables(): Int32Array[] {

@@ -112,39 +112,37 @@ class ColumnReader {
     for (let i = 0; i < fields.length; i++) {
       const field = fields[i].trim();
       const reading = readTableNumber(field);
-      const column = `column ${i + 1} (${names[i]})`;
       if ("problem" in reading) {
-        const code = "format/not-a-number";
-        throw new DataError(
-          code,
-          `Row ${this.row}, ${column}: ${reading.problem}.`,
-          `row ${this.row}, ${column}`,
-        );
+        const place = this.placeOf(i, names);
+        throw new DataError("format/not-a-number", `${place.text}: ${reading.problem}.`, place.where);
       }
-      if (reading.mark !== null) this.checkMark(reading.mark, field, column);
+      if (reading.mark !== null) this.checkMark(reading.mark, field, i, names);
       this.values[i][this.count] = reading.value;
     }
     this.rows[this.count++] = this.row;
   }
 
-  private checkMark(mark: "point" | "comma", field: string, column: string): void {
+  private placeOf(index: number, names: string[]): { where: string; text: string } {
+    const column = `column ${index + 1} (${names[index]})`;
+    return { where: `row ${this.row}, ${column}`, text: `Row ${this.row}, ${column}` };
+  }
+
+  private checkMark(mark: "point" | "comma", field: string, index: number, names: string[]): void {
     if (mark === "comma" && this.table.separator !== ";") {
-      throw new DataError(
-        "format/decimal-comma",
-        `Row ${this.row}, ${column}: "${field}" has a decimal comma. ${decimalHint}`,
-        `row ${this.row}, ${column}`,
-      );
+      const { text, where } = this.placeOf(index, names);
+      const found = `${text}: "${field}" has a decimal comma. ${decimalHint}`;
+      throw new DataError("format/decimal-comma", found, where);
     }
-    this.firstMark[mark] ??= `row ${this.row}, ${column}`;
+    this.firstMark[mark] ??= this.placeOf(index, names).where;
     const other = this.firstMark[mark === "point" ? "comma" : "point"];
-    if (other !== null) {
-      throw new DataError(
-        "format/decimal-comma",
-        `Row ${this.row}, ${column}: "${field}" has a decimal ${mark}, while ${other} has the other mark. Use one ` +
-          "decimal mark in the whole file and no thousands separators.",
-        `row ${this.row}, ${column}`,
-      );
-    }
+    if (other === null) return;
+    const { text, where } = this.placeOf(index, names);
+    throw new DataError(
+      "format/decimal-comma",
+      `${text}: "${field}" has a decimal ${mark}, while ${other} has the other mark. Use one decimal mark in the ` +
+        "whole file and no thousands separators.",
+      where,
+    );
   }
 
   private checkLimits(most: number, columnCount: number): void {

@@ -9,7 +9,8 @@ export type NumberReading =
   /** `mark` is what separates whole and fraction; null where there is no fraction. */
   { value: number; mark: "point" | "comma" | null } | { problem: string };
 
-const plain = /^[+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:[eEdDqQ][+-]?\d+)?$/;
+const plain = /^[+-]?(?:\d+(?:\.\d*)?|\.\d+)(?:[eE][+-]?\d+)?$/;
+const foreign = /^[+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:[eEdDqQ][+-]?\d+)?$/;
 // Fortran drops the letter where the exponent has three digits: 3.14-114.
 const withoutLetter = /^([+-]?(?:\d+[.,]\d*|[.,]\d+))([+-]\d{3})$/;
 const notFinite = /^([+-]?)(nan|inf|infinity)$/i;
@@ -26,7 +27,10 @@ const notFinite = /^([+-]?)(nan|inf|infinity)$/i;
  * @see ISO/IEC 1539-1:2018, 13.7.2.3.2 (F, E and D editing)
  */
 export function readTableNumber(text: string): NumberReading {
-  if (plain.test(text)) return { value: Number(toJavaScript(text)), mark: markOf(text) };
+  if (plain.test(text)) return { value: Number(text), mark: text.includes(".") ? "point" : null };
+  if (foreign.test(text)) {
+    return { value: Number(text.replace(",", ".").replace(/[dDqQ]/, "e")), mark: markOf(text) };
+  }
   const bare = withoutLetter.exec(text);
   if (bare) return { value: Number(`${bare[1].replace(",", ".")}e${bare[2]}`), mark: markOf(text) };
   const special = notFinite.exec(text);
@@ -35,10 +39,6 @@ export function readTableNumber(text: string): NumberReading {
     return { value: special[1] === "-" ? -magnitude : magnitude, mark: null };
   }
   return { problem: describe(text) };
-}
-
-function toJavaScript(text: string): string {
-  return text.replace(",", ".").replace(/[dDqQ]/, "e");
 }
 
 function markOf(text: string): "point" | "comma" | null {
