@@ -2,11 +2,11 @@ import { and, desc, eq, isNotNull, sql } from "drizzle-orm";
 import { db, type Transaction } from "@/app/platform/db.server";
 import { publish } from "@/app/platform/events.server";
 import { conflict } from "@/app/platform/errors";
-import { decisions, marks, problemRevisions, solverVersions, submissions } from "@/drizzle/schema";
+import { marks, problemRevisions, solverVersions, submissions } from "@/drizzle/schema";
 import type { Viewer } from "../accounts/viewer";
 import type { RecordAddress } from "../submissions/submission-view";
 import { requireNote } from "./decision-form";
-import { recordAuditEvent } from "./record-audit-event.server";
+import { recordDecision } from "./record-decision.server";
 import { requireDecider } from "./require-decider.server";
 
 /**
@@ -24,15 +24,13 @@ export async function listSubmission(
     const record = await nextRecord(tx, lineage);
     const superseded = await supersede(tx, record.number);
     await makeListed(tx, guarded.id, record);
-    await tx
-      .insert(decisions)
-      .values({ submissionId: guarded.id, kind: "list", note, decidedById: account.userId });
-    await recordAuditEvent(tx, {
-      actorId: account.userId,
-      action: "submission.list",
-      subjectKind: "submission",
-      subjectId: guarded.id,
-      detail: { note, record, superseded },
+    await recordDecision(tx, {
+      submissionId: guarded.id,
+      kind: "list",
+      note,
+      decidedById: account.userId,
+      state: "listed",
+      detail: { record, superseded },
     });
     return { id: guarded.id, record };
   });
@@ -110,5 +108,4 @@ async function makeListed(tx: Transaction, submissionId: string, record: RecordA
   if (listed.length === 0)
     throw conflict("The submission is not in review any more: somebody else has decided.");
   await tx.update(marks).set({ isListed: true }).where(eq(marks.submissionId, submissionId));
-  await publish(tx, { submissionId, kind: "state", state: "listed" });
 }

@@ -27,7 +27,7 @@ export async function handInSubmission(
     if (!handedIn) throw conflict("Only a scored or returned submission can be handed in.");
     await recordAuditEvent(tx, {
       actorId: account.userId,
-      action: "submission.hand-in",
+      action: "submission.handedIn",
       subjectKind: "submission",
       subjectId: guarded.id,
       detail: { from: guarded.state },

@@ -1,13 +1,12 @@
 import { and, eq } from "drizzle-orm";
 import { db } from "@/app/platform/db.server";
-import { publish } from "@/app/platform/events.server";
 import { conflict, forbidden } from "@/app/platform/errors";
 import type { SubmissionState } from "@/drizzle/enums";
-import { decisions, marks, submissions } from "@/drizzle/schema";
+import { marks, submissions } from "@/drizzle/schema";
 import type { Viewer } from "../accounts/viewer";
 import { requireVerified } from "../accounts/viewer-policy";
 import { requireNote } from "../moderation/decision-form";
-import { recordAuditEvent } from "../moderation/record-audit-event.server";
+import { recordDecision } from "../moderation/record-decision.server";
 import { findGuarded } from "./find-guarded.server";
 import { canWithdraw } from "./submission-policy";
 
@@ -30,20 +29,13 @@ export async function withdrawSubmission(
       .returning({ id: submissions.id, state: submissions.state });
     if (!withdrawn) throw conflict("Only a listed record can be withdrawn.");
     await tx.update(marks).set({ isListed: false }).where(eq(marks.submissionId, guarded.id));
-    await tx.insert(decisions).values({
+    await recordDecision(tx, {
       submissionId: guarded.id,
       kind: "withdraw",
       note,
       decidedById: account.userId,
+      state: withdrawn.state,
     });
-    await recordAuditEvent(tx, {
-      actorId: account.userId,
-      action: "submission.withdraw",
-      subjectKind: "submission",
-      subjectId: guarded.id,
-      detail: { note },
-    });
-    await publish(tx, { submissionId: guarded.id, kind: "state", state: withdrawn.state });
     return withdrawn;
   });
 }
