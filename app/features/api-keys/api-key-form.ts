@@ -29,3 +29,5 @@ export const apiKeyForm = z
       .transform((text) => (text === "never" ? null : Number(text))),
   })
   .pipe(apiKeyPart);
+
+export const revokeForm = z.object({ id: z.string().min(1) });
