@@ -1,0 +1,48 @@
+import { evaluateTaylor, type TaylorValue } from "../expressions/evaluate-taylor";
+import type { Series, TaylorSpace } from "../expressions/taylor-space";
+import type { ProblemDefinition } from "./definition";
+import { compileExact } from "./exact-solution";
+import { parameterValues } from "./problem-context";
+
+/** A point of the space-time domain: values of x, y and t as far as the problem has them. */
+export type Place = Record<string, number>;
+
+/**
+ * The exact solution of each field as a Taylor polynomial about a point.
+ *
+ * @param space in the problem's axes and t
+ * @param place a value of every axis, and of t unless the problem is steady
+ * @returns by field
+ * @throws RangeError where a field has no exact solution
+ * @example exactTaylor(problem, space, { x: 1, t: 0 }).get("u")
+ * @see evaluateTaylor
+ */
+export function exactTaylor(
+  problem: ProblemDefinition,
+  space: TaylorSpace,
+  place: Place,
+): Map<string, TaylorValue> {
+  const valueOf = placeSeries(problem, space, place);
+  return new Map(
+    problem.fields.map(({ name }) => [name, evaluateTaylor(compileExact(problem, name), space, valueOf)[0]]),
+  );
+}
+
+/** Axes and t as variables of the space about a place; parameters as constants. */
+export function placeSeries(
+  problem: ProblemDefinition,
+  space: TaylorSpace,
+  place: Place,
+): (variable: string) => Series {
+  const parameters = parameterValues(problem);
+  return (variable) => {
+    if (place[variable] !== undefined) return space.variable(variable, place[variable]);
+    if (parameters[variable] !== undefined) return space.constant(parameters[variable]);
+    throw new RangeError(`"${variable}" has no value at a point of ${problem.slug}`);
+  };
+}
+
+/** The variables of a problem's Taylor space: its axes, and t unless it is steady. */
+export function spaceVariables(problem: ProblemDefinition): string[] {
+  return [...problem.axes.map((axis) => axis.name), ...(problem.classification.isSteady ? [] : ["t"])];
+}
