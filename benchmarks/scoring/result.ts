@@ -41,8 +41,8 @@ export interface RunScore {
   /** Largest error in the outer tenth of the domain and in the rest, at the last time. */
   maxNearEnds: number | null;
   maxInside: number | null;
-  /** The problem's functional of u and of u* on the run's grid; null for complex data. */
-  functional: { value: number; exact: number } | null;
+  /** The problem's functional (the integral of u^2 unless it says otherwise) by the grid's weights; null for complex data. */
+  functional: number | null;
   /** Facts about the file that findings rest on. */
   reading: RunReading;
 }

@@ -1,0 +1,147 @@
+/** Errors of a run when its file is read in another way than declared: what findings about mistakes rest on. */
+
+import { nodesOf } from "../grids/grid-nodes";
+import { normsOf, sumErrors, type GridValues } from "../norms/error-norms";
+import type { ProblemDefinition } from "../problems/definition";
+import { evaluateExact } from "../problems/exact-solution";
+import { weightsOf } from "../quadrature/quadrature-weights";
+import type { RunAxis, RunFields } from "./read-run";
+
+/** At most this many nodes of an axis are looked at for a shift in time. */
+const sampledNodes = { 1: 512, 2: 32 };
+/** Places in [-T/20, T/20] at which the search for a shift begins. */
+const shiftStarts = 20;
+
+/** The first scored field at the last output time. */
+function lastLevel(run: RunFields): { name: string; t: number | null; u: GridValues } {
+  const field = run.fields[0];
+  return { name: field.name, t: run.times[run.times.length - 1], u: field.times[field.times.length - 1] };
+}
+
+const relativeL2 = (u: GridValues, exact: GridValues, weights: Float64Array[]) =>
+  normsOf([sumErrors(u, exact, weights)]).relL2;
+
+/**
+ * Relative L2 error when a periodic file is read as n - 1 intervals whose last node is the end.
+ *
+ * @returns null where an axis is not `uniform-periodic`
+ * @example endIncludedError(problem, run)
+ * @see the page /scoring, "Findings"
+ */
+export function endIncludedError(problem: ProblemDefinition, run: RunFields): number | null {
+  if (run.axes.some((axis) => axis.kind !== "uniform-periodic")) return null;
+  const { name, t, u } = lastLevel(run);
+  const nodes = run.axes.map((axis) => nodesOf("uniform", axis.n, axis.a, axis.b));
+  const weights = run.axes.map((axis, i) => weightsOf("uniform", nodes[i], axis.a, axis.b));
+  return relativeL2(u, evaluateExact(problem, name, t, nodes), weights);
+}
+
+function transposeSquare(values: Float64Array, n: number): Float64Array {
+  const out = new Float64Array(values.length);
+  for (let i = 0; i < n; i++) for (let j = 0; j < n; j++) out[j * n + i] = values[i * n + j];
+  return out;
+}
+
+/**
+ * Relative L2 error with the axes of a 2-D field exchanged.
+ *
+ * @param exact u* at the run's nodes, at the last output time
+ * @returns null in 1-D, or where the axes differ in their number of nodes
+ * @example transposedError(run, exact, weights)
+ * @see the page /scoring, "Findings"
+ */
+export function transposedError(run: RunFields, exact: GridValues, weights: Float64Array[]): number | null {
+  const [first, second] = run.axes;
+  if (!second || first.n !== second.n) return null;
+  const { u } = lastLevel(run);
+  const exchanged = {
+    values: transposeSquare(u.values, first.n),
+    imaginary: u.imaginary && transposeSquare(u.imaginary, first.n),
+  };
+  return relativeL2(exchanged, exact, weights);
+}
+
+/** Indices of about `limit` nodes spread over an axis. */
+function spreadIndices(n: number, limit: number): number[] {
+  const count = Math.min(n, limit);
+  return Array.from({ length: count }, (_, k) => Math.floor((k * n) / count));
+}
+
+/** The run's values on a sparse sub-grid, and the coordinates of that sub-grid. */
+function sampleRun(run: RunFields): { coordinates: Float64Array[]; values: Float64Array } {
+  const { u } = lastLevel(run);
+  const limit = run.axes.length === 1 ? sampledNodes[1] : sampledNodes[2];
+  const indices = run.axes.map((axis: RunAxis) => spreadIndices(axis.n, limit));
+  const coordinates = run.axes.map((axis, i) => Float64Array.from(indices[i], (j) => axis.nodes[j]));
+  const [outer, inner] = indices.length === 2 ? indices : [[0], indices[0]];
+  const stride = run.axes[run.axes.length - 1].n;
+  const values = Float64Array.from(outer.flatMap((i) => inner.map((j) => u.values[i * stride + j])));
+  return { coordinates, values };
+}
+
+/**
+ * The shift q of the output time, |q| <= T/20, at which u*(x, t + q) is nearest the run, and by what factor the error
+ * is smaller there. Looked for on at most 512 nodes (32 x 32 in 2-D) by Gauss-Newton steps from 20 places.
+ *
+ * @returns null for steady or complex problems, and where no shift helps
+ * @example findTimeShift(problem, run)?.shift
+ * @see Nocedal and Wright 2006, section 10.3 (Gauss-Newton)
+ */
+export function findTimeShift(
+  problem: ProblemDefinition,
+  run: RunFields,
+): { shift: number; factor: number } | null {
+  const { name, t, u } = lastLevel(run);
+  if (t === null || u.imaginary || t === problem.initialTime) return null;
+  const { coordinates, values } = sampleRun(run);
+  const reach = Math.abs(t - problem.initialTime) / 20;
+  const exactAt = (q: number) => evaluateExact(problem, name, t + q, coordinates).values;
+  const squareAt = (exact: Float64Array) => {
+    let sum = 0;
+    for (let i = 0; i < values.length; i++) sum += (values[i] - exact[i]) ** 2;
+    return sum;
+  };
+  const here = squareAt(exactAt(0));
+  if (!(here > 0)) return null;
+  let best = { shift: 0, square: here };
+  for (let k = 0; k <= shiftStarts; k++) {
+    const shift = reach * ((2 * k) / shiftStarts - 1);
+    const square = squareAt(exactAt(shift));
+    if (square < best.square) best = { shift, square };
+  }
+  best = refineShift(best, reach, { values, exactAt, squareAt });
+  if (best.shift === 0) return null;
+  return { shift: best.shift, factor: Math.sqrt(here / Math.max(best.square, Number.MIN_VALUE)) };
+}
+
+/** Gauss-Newton steps from a start, kept as far as each makes the error smaller. */
+function refineShift(
+  start: { shift: number; square: number },
+  reach: number,
+  fit: {
+    values: Float64Array;
+    exactAt: (q: number) => Float64Array;
+    squareAt: (exact: Float64Array) => number;
+  },
+): { shift: number; square: number } {
+  let best = start;
+  const step = reach * 1e-4;
+  for (let pass = 0; pass < 6; pass++) {
+    const exact = fit.exactAt(best.shift);
+    const later = fit.exactAt(best.shift + step);
+    const earlier = fit.exactAt(best.shift - step);
+    let gradient = 0;
+    let curvature = 0;
+    for (let i = 0; i < exact.length; i++) {
+      const rate = (later[i] - earlier[i]) / (2 * step);
+      gradient += rate * (fit.values[i] - exact[i]);
+      curvature += rate * rate;
+    }
+    if (!(curvature > 0)) return best;
+    const shift = Math.max(-reach, Math.min(reach, best.shift + gradient / curvature));
+    const square = fit.squareAt(fit.exactAt(shift));
+    if (!(square < best.square)) return best;
+    best = { shift, square };
+  }
+  return best;
+}
