@@ -91,7 +91,9 @@ const equationsByRevision = new Map<string, string>();
 function equationsOf(revisionId: string, definition: ProblemDefinition): string {
   const kept = equationsByRevision.get(revisionId);
   if (kept !== undefined) return kept;
-  const latex = typesetProblem(definition).equations.join(" \\\\ ");
+  const { equations } = typesetProblem(definition);
+  const latex =
+    equations.length === 1 ? equations[0] : `\\begin{gathered}${equations.join(" \\\\ ")}\\end{gathered}`;
   equationsByRevision.set(revisionId, latex);
   return latex;
 }

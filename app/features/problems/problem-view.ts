@@ -5,7 +5,7 @@ import type {
   Classification,
   ProblemDefinition,
 } from "@/benchmarks/problems/definition";
-import type { typesetProblem } from "@/benchmarks/problems/typeset";
+import type { TypesetProblem } from "@/benchmarks/problems/typeset";
 import type { MethodFamily, RevisionState } from "@/drizzle/enums";
 
 /** What names a problem in a list, a row or a heading. */
@@ -22,7 +22,7 @@ export interface ProblemSummary extends ProblemName {
   axes: Axis[];
   /** Kinds of boundary condition that occur; empty for a periodic problem. */
   boundaryKinds: BoundaryCondition["kind"][];
-  /** The equations in LaTeX, one line each joined by a line break of LaTeX. */
+  /** The equations as one formula of LaTeX. */
   equationsLatex: string;
   revision: number;
   /** Listed records on the current revision. */
@@ -47,7 +47,7 @@ export interface ProblemView extends ProblemName {
   publishedAt: Date | null;
   /** False for a retired revision, which is shown with a notice. */
   isCurrent: boolean;
-  typeset: ReturnType<typeof typesetProblem>;
+  typeset: TypesetProblem;
   /** Newest first; drafts are left out. */
   revisions: RevisionSummary[];
 }
