@@ -11,6 +11,8 @@ import type { RunAxis, RunFields } from "./read-run";
 const sampledNodes = { 1: 512, 2: 32 };
 /** Places in [-T/20, T/20] at which the search for a shift begins. */
 const shiftStarts = 20;
+/** Beyond this the rounding of the data decides by what factor the error is smaller. */
+const largestFactor = 1e12;
 
 /** The first scored field at the last output time. */
 function lastLevel(run: RunFields): { name: string; t: number | null; u: GridValues } {
@@ -111,7 +113,8 @@ export function findTimeShift(
   }
   best = refineShift(best, reach, { values, exactAt, squareAt });
   if (best.shift === 0) return null;
-  return { shift: best.shift, factor: Math.sqrt(here / Math.max(best.square, Number.MIN_VALUE)) };
+  const factor = Math.sqrt(here / Math.max(best.square, here / largestFactor ** 2));
+  return { shift: best.shift, factor };
 }
 
 /** Gauss-Newton steps from a start, kept as far as each makes the error smaller. */

@@ -73,8 +73,8 @@ function findMisreading({ reading, times }: RunScore): Draft[] {
   }
   if (timeShift && timeShift.factor >= timeShiftFactor) {
     const { shift, factor } = timeShift;
-    const message = `The error is ${digits(factor)} times smaller against the exact solution at t + q with q = ${digits(shift)}. The field may be at another time than the one asked for.`;
-    drafts.push({ code: "wrong-time", severity: "warning", message, figures: { shift, factor } });
+    const message = `The error is ${digits(factor)} times smaller against the exact solution at t + q with q = ${digits(shift)}. The field may be at another time than the one asked for, or the whole error of the scheme acts as a delay.`;
+    drafts.push({ code: "wrong-time", severity: "note", message, figures: { shift, factor } });
   }
   return drafts;
 }
