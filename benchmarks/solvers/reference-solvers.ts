@@ -1,0 +1,155 @@
+import type { GridKind } from "../grids/grid-kind";
+import type { ProblemDefinition } from "../problems/definition";
+import { type BoundedScheme, chebyshevScheme, secondOrderScheme } from "./bounded-scheme";
+import { centralScheme, compactScheme, fourierScheme, type PeriodicScheme } from "./periodic-scheme";
+import type { ProblemSolver, ReferenceSolver, SolvedRun } from "./reference-solver";
+import { solveBoundaryLayer, solveHeat, solveMixedPoisson } from "./solve-bounded";
+import { solveAdvectionDiffusion, solvePeriodicHelmholtz } from "./solve-periodic-linear";
+import { solveBurgers, solveNonlinearDiffusion } from "./solve-periodic-nonlinear";
+import { suggestedNodesOf } from "./suggested-nodes";
+
+const periodicSolvers: Record<string, ProblemSolver<PeriodicScheme>> = {
+  "advection-exp-sine": solveAdvectionDiffusion,
+  "advection-diffusion-gaussian": solveAdvectionDiffusion,
+  "burgers-periodic": solveBurgers,
+  "helmholtz-periodic-2d": solvePeriodicHelmholtz,
+  "nonlinear-diffusivity": solveNonlinearDiffusion,
+};
+
+const boundedSolvers: Record<string, ProblemSolver<BoundedScheme>> = {
+  "heat-dirichlet": solveHeat,
+  "heat-neumann-robin": solveHeat,
+  "boundary-layer": solveBoundaryLayer,
+  "poisson-mixed-2d": solveMixedPoisson,
+};
+
+/** What a solver does with the problems of one table. */
+interface Capability {
+  problems: string[];
+  gridKind: GridKind;
+  solve(problem: ProblemDefinition, n: number[]): SolvedRun;
+}
+
+function capability<Scheme>(
+  table: Record<string, ProblemSolver<Scheme>>,
+  scheme: Scheme,
+  gridKind: GridKind,
+): Capability {
+  return {
+    problems: Object.keys(table),
+    gridKind,
+    solve: (problem, n) => table[problem.slug](problem, n, scheme),
+  };
+}
+
+/** The parts of a solver that follow from what it can solve. */
+function solving(
+  slug: string,
+  capabilities: Capability[],
+): Pick<ReferenceSolver, "slug" | "problems" | "gridKinds" | "suggestedNodes" | "solve" | "version"> {
+  const capabilityFor = (problemSlug: string): Capability => {
+    const found = capabilities.find(({ problems }) => problems.includes(problemSlug));
+    if (!found) throw new RangeError(`${slug} does not solve "${problemSlug}"`);
+    return found;
+  };
+  return {
+    slug,
+    version: "1.0.0",
+    problems: capabilities.flatMap(({ problems }) => problems),
+    gridKinds: (problemSlug) => {
+      const { gridKind } = capabilityFor(problemSlug);
+      return suggestedNodesOf(slug, problemSlug)[0].map(() => gridKind);
+    },
+    suggestedNodes: (problemSlug) => suggestedNodesOf(slug, problemSlug),
+    solve(problem, n) {
+      if (n.length !== problem.axes.length) {
+        throw new RangeError(
+          `${problem.slug} has ${problem.axes.length} axes; nodes of ${n.length} were given`,
+        );
+      }
+      return capabilityFor(problem.slug).solve(problem, n);
+    },
+  };
+}
+
+function onPeriodicGrids(scheme: PeriodicScheme): Capability {
+  return capability(periodicSolvers, scheme, "uniform-periodic");
+}
+
+function centralSolver(order: 2 | 4 | 6): ReferenceSolver {
+  const periodic = onPeriodicGrids(centralScheme(order));
+  const bounded = capability(boundedSolvers, secondOrderScheme, "uniform");
+  const closures =
+    "Fluxes of a variable diffusivity are taken at half points; ghost points close ends with a derivative condition.";
+  return {
+    ...solving(`house-fd${order}`, order === 2 ? [periodic, bounded] : [periodic]),
+    name: `Central differences, order ${order}`,
+    family: "finiteDifference",
+    method: `Explicit central differences of order ${order} on a uniform grid`,
+    formalOrder: order,
+    claim: { kind: "algebraic", order },
+    description: `Method of lines with explicit central differences of order ${order}. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with a tolerance of 1e-12. ${order === 2 ? closures : "A diffusive flux is the first difference applied twice."}`,
+    reconstruction: { kind: "piecewise-polynomial", degree: order + 1 },
+  };
+}
+
+function compactSolver(order: 4 | 6): ReferenceSolver {
+  return {
+    ...solving(`house-compact${order}`, [onPeriodicGrids(compactScheme(order))]),
+    name: `Compact differences, order ${order}`,
+    family: "compactDifference",
+    method: `Tridiagonal compact differences of order ${order} (Lele 1992)`,
+    formalOrder: order,
+    claim: { kind: "algebraic", order },
+    description: `Method of lines with Lele's tridiagonal schemes of order ${order} for the first and the second derivative. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with a tolerance of 1e-12.`,
+    reconstruction: { kind: "piecewise-polynomial", degree: order + 1 },
+  };
+}
+
+const fourierSolver: ReferenceSolver = {
+  ...solving("house-fourier", [onPeriodicGrids(fourierScheme)]),
+  name: "Fourier pseudo-spectral",
+  family: "fourier",
+  method: "Fourier collocation without dealiasing",
+  formalOrder: null,
+  claim: { kind: "exponential" },
+  description:
+    "Fourier collocation on uniform nodes, products formed at the nodes without dealiasing. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with a tolerance of 1e-12.",
+  reconstruction: { kind: "trigonometric" },
+};
+
+const chebyshevSolver: ReferenceSolver = {
+  ...solving("house-cheb", [capability(boundedSolvers, chebyshevScheme, "chebyshev-lobatto")]),
+  name: "Chebyshev collocation",
+  family: "chebyshev",
+  method: "Chebyshev-Lobatto collocation, boundary rows eliminated",
+  formalOrder: null,
+  claim: { kind: "exponential" },
+  description:
+    "Collocation on Chebyshev-Lobatto nodes; the end values are eliminated by the boundary conditions. Exact in time by the matrix exponential; steady problems are solved directly.",
+  reconstruction: { kind: "polynomial" },
+};
+
+/** The house's own solvers. */
+export const referenceSolvers: ReferenceSolver[] = [
+  centralSolver(2),
+  centralSolver(4),
+  centralSolver(6),
+  compactSolver(4),
+  compactSolver(6),
+  fourierSolver,
+  chebyshevSolver,
+];
+
+/**
+ * The reference solver of a slug.
+ *
+ * @throws RangeError where there is none
+ * @example referenceSolver("house-fd4").claim // { kind: "algebraic", order: 4 }
+ * @see referenceSolvers
+ */
+export function referenceSolver(slug: string): ReferenceSolver {
+  const solver = referenceSolvers.find((candidate) => candidate.slug === slug);
+  if (!solver) throw new RangeError(`there is no reference solver "${slug}"`);
+  return solver;
+}

@@ -1,0 +1,71 @@
+/** Doubling grids for schemes of a fixed order. */
+const doubling = [16, 32, 64, 128, 256, 512];
+
+/** Nodes per axis of the grids on which each solver's study is informative; by problem, else under "*". */
+const sequences: Record<string, Record<string, number[]>> = {
+  "house-fd2": {
+    "*": doubling,
+    "advection-diffusion-gaussian": [32, 64, 128, 256, 512, 1024],
+    "helmholtz-periodic-2d": [16, 32, 64, 128, 256],
+    "nonlinear-diffusivity": [16, 32, 64, 128, 256],
+    "heat-dirichlet": [9, 17, 33, 65, 129, 257],
+    "heat-neumann-robin": [9, 17, 33, 65, 129, 257],
+    "boundary-layer": [17, 33, 65, 129, 257, 513, 1025],
+    "poisson-mixed-2d": [9, 17, 33, 65, 129],
+  },
+  "house-fd4": {
+    "*": doubling,
+    "advection-diffusion-gaussian": [32, 64, 128, 256, 512, 1024],
+    "helmholtz-periodic-2d": [16, 32, 64, 128, 256],
+    "nonlinear-diffusivity": [16, 32, 64, 128, 256],
+  },
+  "house-fd6": {
+    "*": [16, 32, 64, 128, 256],
+    "advection-diffusion-gaussian": [32, 64, 128, 256, 512],
+    "helmholtz-periodic-2d": [16, 32, 64, 128],
+  },
+  "house-compact4": {
+    "*": [16, 32, 64, 128, 256],
+    "advection-diffusion-gaussian": [32, 64, 128, 256, 512],
+    "helmholtz-periodic-2d": [16, 32, 64, 128],
+    "nonlinear-diffusivity": [16, 32, 64, 96, 128],
+  },
+  "house-compact6": {
+    "*": [16, 32, 64, 128],
+    "advection-diffusion-gaussian": [32, 64, 128, 256],
+    "nonlinear-diffusivity": [16, 24, 32, 48, 64, 96],
+  },
+  "house-fourier": {
+    "*": [8, 10, 12, 14, 16, 18, 20, 22, 24, 28, 32],
+    "advection-diffusion-gaussian": [8, 10, 12, 14, 16, 18, 20, 22, 24, 28, 32, 36, 40, 48],
+    "burgers-periodic": [12, 16, 20, 24, 28, 32, 36, 40, 48, 56, 64, 72, 80],
+    "nonlinear-diffusivity": [12, 14, 16, 18, 20, 22, 24, 26, 28, 32, 36, 40, 48],
+  },
+  "house-fd2-bounded": {
+    "*": [9, 17, 33, 65, 129, 257],
+    "boundary-layer": [17, 33, 65, 129, 257, 513, 1025],
+  },
+  "house-cheb": {
+    // Every other number: odd and even ones converge apart on solutions with a symmetry.
+    "heat-dirichlet": [5, 7, 9, 11, 13, 15, 17, 21],
+    "heat-neumann-robin": [6, 8, 10, 12, 14, 16, 18, 20],
+    "boundary-layer": [9, 11, 13, 15, 17, 19, 21, 23, 25, 27, 29, 33, 41],
+    "poisson-mixed-2d": [6, 8, 10, 12, 14, 16, 18, 20],
+  },
+};
+
+const planar = new Set(["helmholtz-periodic-2d", "poisson-mixed-2d"]);
+
+/**
+ * Nodes along each axis for each grid of a reference solver's study on a problem.
+ *
+ * @throws RangeError where there is no solver of the slug
+ * @example suggestedNodesOf("house-fd2", "helmholtz-periodic-2d")[0] // [16, 16]
+ * @see referenceSolvers
+ */
+export function suggestedNodesOf(solverSlug: string, problemSlug: string): number[][] {
+  const bySlug = sequences[solverSlug];
+  if (!bySlug) throw new RangeError(`there is no reference solver "${solverSlug}"`);
+  const sequence = bySlug[problemSlug] ?? bySlug["*"];
+  return sequence.map((n) => (planar.has(problemSlug) ? [n, n] : [n]));
+}
