@@ -39,7 +39,7 @@ const sequences: Record<string, Record<string, number[]>> = {
     "*": [8, 10, 12, 14, 16, 18, 20, 22, 24, 28, 32],
     "advection-diffusion-gaussian": [8, 10, 12, 14, 16, 18, 20, 22, 24, 28, 32, 36, 40, 48],
     "burgers-periodic": [12, 16, 20, 24, 28, 32, 36, 40, 48, 56, 64, 72, 80],
-    "nonlinear-diffusivity": [12, 14, 16, 18, 20, 22, 24, 26, 28, 32, 36, 40, 48],
+    "nonlinear-diffusivity": [12, 16, 20, 24, 28, 32, 36, 40, 48],
   },
   "house-fd2-bounded": {
     "*": [9, 17, 33, 65, 129, 257],
