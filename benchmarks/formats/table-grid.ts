@@ -7,7 +7,6 @@ import type { TableColumns } from "./table-columns";
 
 interface GridAxis {
   name: string;
-  column: Float64Array;
   /** Distinct coordinates; ascending, or in the order of the rows where a lone axis is strictly monotone. */
   coordinates: Float64Array;
   /** Position along the axis for each row. */
@@ -87,17 +86,35 @@ function findAxis(name: string, column: Float64Array, isLine: boolean): GridAxis
   if (isLine && isStrictlyMonotone(column)) {
     return {
       name,
-      column,
       coordinates: column.slice(),
       positions: new Int32Array(column.length).map((_, i) => i),
     };
   }
-  const coordinates = Float64Array.from(new Set(column)).sort();
-  const position = new Map<number, number>();
-  coordinates.forEach((value, index) => position.set(value, index));
-  const positions = new Int32Array(column.length);
-  for (let i = 0; i < column.length; i++) positions[i] = position.get(column[i]) ?? -1;
-  return { name, column, coordinates, positions };
+  const coordinates = distinct(column);
+  return { name, coordinates, positions: positionsIn(coordinates, column) };
+}
+
+/** Sorted; -0 and 0 are one value. */
+function distinct(column: Float64Array): Float64Array {
+  const sorted = column.slice().sort();
+  let count = 0;
+  for (let i = 0; i < sorted.length; i++) {
+    if (count === 0 || sorted[i] !== sorted[count - 1]) sorted[count++] = sorted[i];
+  }
+  return sorted.slice(0, count);
+}
+
+/** Place of each value of the column among the sorted coordinates, by bisection. */
+function positionsIn(coordinates: Float64Array, column: Float64Array): Int32Array {
+  return new Int32Array(column.length).map((_, i) => {
+    let [low, high] = [0, coordinates.length - 1];
+    while (low < high) {
+      const middle = (low + high) >> 1;
+      if (coordinates[middle] < column[i]) low = middle + 1;
+      else high = middle;
+    }
+    return low;
+  });
 }
 
 function isStrictlyMonotone(column: Float64Array): boolean {
@@ -139,12 +156,13 @@ function explainGaps(
   target: Float64Array,
   nodeCount: number,
 ): DataError {
-  const order = new Uint32Array(target.length)
-    .map((_, i) => i)
-    .sort((a, b) => target[a] - target[b] || a - b);
-  for (let i = 1; i < order.length; i++) {
-    const [first, second] = [order[i - 1], order[i]];
-    if (target[first] !== target[second]) continue;
+  const sorted = target.slice().sort();
+  // Beyond 2^53 different places may round to the same number.
+  const isExact = Number.isSafeInteger(nodeCount);
+  const repeated = isExact ? sorted.findIndex((place, i) => i > 0 && place === sorted[i - 1]) : -1;
+  if (repeated >= 0) {
+    const first = target.indexOf(sorted[repeated]);
+    const second = target.indexOf(sorted[repeated], first + 1);
     return new DataError(
       "grid/duplicate-node",
       `Rows ${rows[first]} and ${rows[second]} are both at ${nodeName(axes, target[first])}. Write each node once` +
@@ -152,8 +170,8 @@ function explainGaps(
       `row ${rows[second]}`,
     );
   }
-  let missing = 0;
-  while (missing < order.length && target[order[missing]] === missing) missing++;
+  const gap = sorted.findIndex((place, i) => place !== i);
+  const missing = gap < 0 ? sorted.length : gap;
   const counts = axes.map(({ name, coordinates }) => `${coordinates.length} distinct ${name}`).join(" and ");
   return new DataError(
     "grid/missing-node",

@@ -9,6 +9,9 @@ export type NumberReading =
   /** `mark` is what separates whole and fraction; null where there is no fraction. */
   { value: number; mark: "point" | "comma" | null } | { problem: string };
 
+// A double needs at most 17 digits; some programs write many more.
+const maxCharacters = 128;
+
 const plain = /^[+-]?(?:\d+(?:\.\d*)?|\.\d+)(?:[eE][+-]?\d+)?$/;
 const foreign = /^[+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:[eEdDqQ][+-]?\d+)?$/;
 // Fortran drops the letter where the exponent has three digits: 3.14-114.
@@ -27,6 +30,7 @@ const notFinite = /^([+-]?)(nan|inf|infinity)$/i;
  * @see ISO/IEC 1539-1:2018, 13.7.2.3.2 (F, E and D editing)
  */
 export function readTableNumber(text: string): NumberReading {
+  if (text.length > maxCharacters) return { problem: describe(text) };
   if (plain.test(text)) return { value: Number(text), mark: text.includes(".") ? "point" : null };
   if (foreign.test(text)) {
     return { value: Number(text.replace(",", ".").replace(/[dDqQ]/, "e")), mark: markOf(text) };

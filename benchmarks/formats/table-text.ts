@@ -9,6 +9,8 @@ import { DataError } from "../scoring/data-error";
  */
 export type Separator = "," | ";" | "\t";
 
+const maxRowCharacters = 65536;
+
 const separatorNames: Record<Separator, string> = { ",": "comma", ";": "semicolon", "\t": "tab" };
 
 /**
@@ -30,8 +32,8 @@ export interface TableText {
  *
  * @param bytes the whole file, UTF-8 with or without a byte order mark, lines ended by LF, CRLF or CR
  * @returns the text, its separator and the number of its lines
- * @throws DataError `format/not-utf8` naming the byte offset; `format/no-header` or `format/separator`
- *   naming the row
+ * @throws DataError `format/not-utf8` naming the byte offset; `format/no-header`, `format/separator`,
+ *   `format/quotes` or `format/long-row` naming the row
  * @example decodeTable(new TextEncoder().encode("# run 3\nx;u\n0;1\n")).separator // ";"
  * @see RFC 4180; RFC 3629 (UTF-8)
  */
@@ -48,12 +50,14 @@ export function decodeTable(bytes: Uint8Array): TableText {
       "row 1",
     );
   }
-  const headerRow = countLines(text, start);
+  const rowCount = countLines(text);
+  const headerRow = countLines(text.slice(0, start));
   const lineStart = text.lastIndexOf("\n", start) + 1;
   const lineEnd = text.indexOf("\n", start);
   const header = text.slice(lineStart, lineEnd < 0 ? undefined : lineEnd);
   const separator = findSeparator(header, headerRow, firstComment);
-  return { text, separator, headerRow, rowCount: countLines(text, text.length) };
+  if (text.includes('"')) refuseStrayQuotes(text, separator);
+  return { text, separator, headerRow, rowCount };
 }
 
 function decodeUtf8(bytes: Uint8Array): string {
@@ -88,10 +92,38 @@ function isUtf8(bytes: Uint8Array, mayContinue = false): boolean {
   }
 }
 
-function countLines(text: string, end: number): number {
+function countLines(text: string): number {
   let count = 1;
-  for (let at = text.indexOf("\n"); at >= 0 && at < end; at = text.indexOf("\n", at + 1)) count++;
+  let start = 0;
+  for (let end = text.indexOf("\n"); end >= 0; end = text.indexOf("\n", start)) {
+    if (end - start > maxRowCharacters) throw tooLong(count, end - start);
+    count++;
+    start = end + 1;
+  }
+  if (text.length - start > maxRowCharacters) throw tooLong(count, text.length - start);
   return count;
+}
+
+function tooLong(row: number, length: number): DataError {
+  return new DataError(
+    "format/long-row",
+    `Row ${row} is ${length} characters long, at most ${maxRowCharacters} are read. Write one row a node.`,
+    `row ${row}`,
+  );
+}
+
+/** Quotation marks may enclose a whole field of one row. */
+function refuseStrayQuotes(text: string, separator: Separator): void {
+  const field = `(?:"[^"]*"|[^"${separator}]*)`;
+  const sound = new RegExp(`^${field}(?:${separator}${field})*$`);
+  const lines = text.split("\n");
+  const row = 1 + lines.findIndex((line) => line.includes('"') && !sound.test(line));
+  if (row === 0) return;
+  throw new DataError(
+    "format/quotes",
+    `Row ${row} has a quotation mark that does not enclose a whole field of this row. Write numbers without quotes.`,
+    `row ${row}`,
+  );
 }
 
 function findSeparator(header: string, row: number, comment: string | null): Separator {
