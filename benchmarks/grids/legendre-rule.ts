@@ -96,19 +96,56 @@ function legendrePairQuick(n: number, x: number, out: Float64Array): void {
   out[1] = before;
 }
 
-/** x*P_n - P_(n-1), which is (x^2 - 1) P_n'/n, from doubled values and rounded to double at the end. */
-function scaledSlope(x: number, pair: Float64Array): number {
-  const product = x * pair[0];
-  let scaled = splitter * x;
-  const x1 = scaled - (scaled - x);
-  const x2 = x - x1;
-  scaled = splitter * pair[0];
-  const p1 = scaled - (scaled - pair[0]);
-  const p2 = pair[0] - p1;
-  const low = x1 * p1 - product + x1 * p2 + x2 * p1 + x2 * p2 + x * pair[1] - pair[3];
-  const sum = product - pair[2];
-  const shift = sum - product;
-  return sum + (product - (sum - shift) + (-pair[2] - shift) + low);
+/** An unevaluated sum of two doubles, the second far below the first. */
+type Double = [high: number, low: number];
+
+function exactSum(a: number, b: number): Double {
+  const sum = a + b;
+  const shift = sum - a;
+  return [sum, a - (sum - shift) + (b - shift)];
+}
+
+function exactProduct(a: number, b: number): Double {
+  const product = a * b;
+  let scaled = splitter * a;
+  const a1 = scaled - (scaled - a);
+  const a2 = a - a1;
+  scaled = splitter * b;
+  const b1 = scaled - (scaled - b);
+  const b2 = b - b1;
+  return [product, a1 * b1 - product + a1 * b2 + a2 * b1 + a2 * b2];
+}
+
+function product(a: Double, b: Double): Double {
+  const [high, low] = exactProduct(a[0], b[0]);
+  return [high, low + a[0] * b[1] + a[1] * b[0]];
+}
+
+/** a/b, rounded once or twice. */
+function quotient(a: Double, b: Double): number {
+  const first = a[0] / b[0];
+  const back = exactProduct(first, b[0]);
+  return first + (a[0] - back[0] - back[1] + a[1] - first * b[1]) / b[0];
+}
+
+/** P_(n-1) - x P_n, which is (1 - x^2) P_n'/n. */
+function scaledSlope(x: number, pair: Float64Array): Double {
+  const [high, low] = product([x, 0], [pair[0], pair[1]]);
+  const [sum, rest] = exactSum(pair[2], -high);
+  return [sum, rest + pair[3] - low];
+}
+
+/** 1 - x^2 for x = x_0 - change. */
+function complement(x0: number, change: number): Double {
+  const [x, rest] = exactSum(x0, -change);
+  const [below, belowRest] = exactSum(1, -x);
+  const [above, aboveRest] = exactSum(1, x);
+  return product([below, belowRest - rest], [above, aboveRest + rest]);
+}
+
+/** 2 a / (scale b^2), scale a whole number. */
+function weightOf(a: Double, b: Double, scale: number): number {
+  return quotient([2 * a[0], 2 * a[1]], product([scale, 0], product(b, b)));
 }
 
 function checkCount(name: string, n: number, least: number): void {
@@ -144,20 +181,16 @@ export function gaussLegendre(n: number): LegendreRule {
       if (Math.abs(change) < 1e-14) break;
     }
     legendrePair(n, x, 0, ratios, pair);
-    const square = (1 - x) * (1 + x);
-    const slope = (-n * scaledSlope(x, pair)) / square;
-    const change = pair[0] / slope;
-    // The derivative and 1 - x^2 at the corrected node, to first order in the correction.
-    const slopeThere = slope - (change * (2 * x * slope - n * (n + 1) * pair[0])) / square;
-    const squareThere = square + 2 * x * change - change * change;
+    const slope = scaledSlope(x, pair);
+    const change = (pair[0] * (1 - x) * (1 + x)) / (n * slope[0]);
     nodes[n - 1 - i] = x - change;
     nodes[i] = -nodes[n - 1 - i];
-    weights[i] = weights[n - 1 - i] = 2 / (squareThere * slopeThere * slopeThere);
+    // (1 - x^2) P_n' is stationary at the node, so that the corrected node needs no new evaluation of it.
+    weights[i] = weights[n - 1 - i] = weightOf(complement(x, change), slope, n * n);
   }
   if (n % 2 === 1) {
     legendrePair(n, 0, 0, ratios, pair);
-    const slope = n * (pair[2] + pair[3]);
-    weights[n >> 1] = 2 / (slope * slope);
+    weights[n >> 1] = weightOf([1, 0], [pair[2], pair[3]], n * n);
   }
   return { nodes, weights };
 }
@@ -187,7 +220,7 @@ export function gaussLobatto(n: number): LegendreRule {
   for (let i = 1; i <= degree >> 1; i++) {
     if (2 * i === degree) {
       legendrePair(degree, 0, 0, ratios, pair);
-      weights[i] = 2 / (scale * pair[0] * pair[0]);
+      weights[i] = weightOf([1, 0], [pair[0], pair[1]], scale);
       break;
     }
     const shift = i + 0.25;
@@ -202,12 +235,12 @@ export function gaussLobatto(n: number): LegendreRule {
     }
     legendrePair(degree, x, 0, ratios, pair);
     const square = (1 - x) * (1 + x);
-    const slope = (-degree * scaledSlope(x, pair)) / square;
+    const slope = (degree * scaledSlope(x, pair)[0]) / square;
     const change = (slope * square) / (2 * x * slope - scale * pair[0]);
-    const value = pair[0] - change * slope;
     nodes[degree - i] = x - change;
     nodes[i] = -nodes[degree - i];
-    weights[i] = weights[degree - i] = 2 / (scale * value * value);
+    // P_(n-1) is stationary at the node.
+    weights[i] = weights[degree - i] = weightOf([1, 0], [pair[0], pair[1]], scale);
   }
   return { nodes, weights };
 }

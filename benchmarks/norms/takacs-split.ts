@@ -44,7 +44,9 @@ export function takacsSplit(u: Float64Array, exact: Float64Array): TakacsSplit |
   const meanError = mean(n, (j) => u[j] - exact[j]);
   const sigmaExact = Math.sqrt(mean(n, (j) => (exact[j] - meanExact) ** 2));
   const sigma = Math.sqrt(mean(n, (j) => (exact[j] - meanExact + (u[j] - exact[j] - meanError)) ** 2));
-  if (sigma === 0 || sigmaExact === 0) return null;
+  // A constant u leaves rounding behind: it is formed from u* and the error.
+  const rounding = 4 * 2 ** -52 * (sigmaExact + Math.sqrt(mean(n, (j) => u[j] ** 2)));
+  if (sigma <= rounding || sigmaExact === 0) return null;
   const difference =
     mean(n, (j) => {
       const d = u[j] - exact[j] - meanError;
