@@ -1,9 +1,10 @@
-import { and, desc, eq } from "drizzle-orm";
+import { and, desc, eq, inArray, sql } from "drizzle-orm";
 import { db } from "@/app/platform/db.server";
 import { curvePoints } from "@/benchmarks/convergence/nodes-for-tolerance";
-import { solvers, solverVersions, studies, submissions, teams } from "@/drizzle/schema";
+import { findings, solvers, solverVersions, studies, submissions, teams } from "@/drizzle/schema";
 import type { Viewer } from "../accounts/viewer";
 import { findRevision } from "../problems/find-revision.server";
+import { decidingCodes, whyBetweenOnly, type DecidingFinding } from "./between-only";
 import { rankStudies, compareSortKeys, sortKeyOf, type NotReached, type Reached } from "./rank-studies";
 import type { NotReachedRow, RankedSubmission, Ranking, RankingCurve, RankingRow } from "./ranking";
 import { decodeCursor, encodeCursor } from "./ranking-cursor.server";
@@ -57,6 +58,7 @@ async function loadCandidates(revisionId: string, { norm, measure }: RankingQuer
       handedInAt: submissions.handedInAt,
       createdAt: submissions.createdAt,
       study: studies.study,
+      deciding: decidingFindings,
     })
     .from(submissions)
     .innerJoin(
@@ -74,8 +76,21 @@ async function loadCandidates(revisionId: string, { norm, measure }: RankingQuer
     .where(and(eq(submissions.problemRevisionId, revisionId), eq(submissions.state, "listed")))
     // Of several scorer versions the latest study counts.
     .orderBy(studies.submissionId, desc(studies.createdAt));
-  return rows.map((row) => ({ ...row, handedInAt: row.handedInAt ?? row.createdAt }));
+  return rows.map(({ deciding, ...row }) => ({
+    ...row,
+    handedInAt: row.handedInAt ?? row.createdAt,
+    barredBy: measure === "nodes" ? whyBetweenOnly(deciding, row.study) : null,
+  }));
 }
+
+/** Of the scorer version that the study is of. */
+const decidingFindings = sql<DecidingFinding[]>`coalesce((
+  select jsonb_agg(jsonb_build_object(
+    'code', ${findings.code}, 'severity', ${findings.severity}, 'figures', ${findings.figures}))
+  from ${findings}
+  where ${findings.submissionId} = ${studies.submissionId}
+    and ${findings.scorerVersion} = ${studies.scorerVersion}
+    and ${inArray(findings.code, decidingCodes)}), '[]'::jsonb)`;
 
 function positionAfter(rows: Reached<Listed>[], cursor: string): number {
   const key = decodeCursor(cursor);

@@ -1,5 +1,6 @@
 import { nodesForTolerance, type Reading } from "@/benchmarks/convergence/nodes-for-tolerance";
 import type { Study } from "@/benchmarks/scoring/result";
+import type { BetweenOnlyReason } from "./between-only";
 import type { RankBy } from "./ranking-query";
 
 /** What ordering needs to know of one listed submission. */
@@ -7,6 +8,8 @@ export interface Candidate {
   submissionId: string;
   handedInAt: Date;
   study: Study;
+  /** Set where the measure is one that this study does not rank on. */
+  barredBy: BetweenOnlyReason | null;
 }
 
 export interface Reached<C extends Candidate> {
@@ -21,7 +24,7 @@ export interface Reached<C extends Candidate> {
 export interface NotReached<C extends Candidate> {
   candidate: C;
   smallestError: number;
-  reason: Extract<Reading, { kind: "notReached" }>["reason"] | "noDeclaredCost";
+  reason: Extract<Reading, { kind: "notReached" }>["reason"] | "noDeclaredCost" | BetweenOnlyReason;
   at: number[];
 }
 
@@ -54,6 +57,11 @@ export function rankStudies<C extends Candidate>(
   const notReached: NotReached<C>[] = [];
   for (const candidate of candidates) {
     const reading = nodesForTolerance(candidate.study, tolerance);
+    const { barredBy } = candidate;
+    if (reading.kind === "reached" && barredBy !== null) {
+      notReached.push({ candidate, smallestError: reading.errorAtReading, reason: barredBy, at: reading.n });
+      continue;
+    }
     if (reading.kind === "notReached") {
       const { smallestError, reason, at } = reading;
       notReached.push({ candidate, smallestError, reason, at });

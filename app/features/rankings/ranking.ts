@@ -3,6 +3,7 @@ import type { Claim } from "@/benchmarks/scoring/declaration";
 import type { StudyKind, StudyTail, Verdict } from "@/benchmarks/scoring/result";
 import type { Measure, MethodFamily, Precision, RelativeNorm } from "@/drizzle/enums";
 import type { ProblemName } from "../problems/problem-view";
+import type { BetweenOnlyReason } from "./between-only";
 import type { RankBy } from "./ranking-query";
 
 /** What a row of the ranking and a line of "does not reach" have in common. */
@@ -43,7 +44,7 @@ export interface RankingRow extends RankedSubmission {
 
 export interface NotReachedRow extends RankedSubmission {
   smallestError: number;
-  reason: Extract<Reading, { kind: "notReached" }>["reason"] | "noDeclaredCost";
+  reason: Extract<Reading, { kind: "notReached" }>["reason"] | "noDeclaredCost" | BetweenOnlyReason;
   /** Nodes along each axis of the run with that error. */
   at: number[];
 }

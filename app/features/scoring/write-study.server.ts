@@ -5,6 +5,7 @@ import { nodesForTolerance } from "@/benchmarks/convergence/nodes-for-tolerance"
 import type { Finding, Study } from "@/benchmarks/scoring/result";
 import { scorerVersion } from "@/benchmarks/scoring/scorer-version";
 import { findings as findingRows, marks, studies as studyRows, submissions } from "@/drizzle/schema";
+import { whyBetweenOnly } from "../rankings/between-only";
 import type { StoredStudy } from "./stored-study.server";
 
 /** Studies, findings, marks and the state `scored`, in one transaction; nothing where the state has moved on. */
@@ -31,7 +32,11 @@ export async function writeStudy(study: StoredStudy, studies: Study[], findings:
       )
       .onConflictDoNothing();
     await writeFindings(tx, study, findings);
-    await writeMarks(tx, study, studies);
+    // What does not rank at the nodes has no marks there.
+    const ranked = studies.filter(
+      (one) => one.measure === "between" || whyBetweenOnly(findings, one) === null,
+    );
+    await writeMarks(tx, study, ranked);
     await publish(tx, { submissionId, kind: "state", state: "scored" });
   });
 }

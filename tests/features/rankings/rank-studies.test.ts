@@ -8,7 +8,7 @@ function candidate(
   runs: [nodes: number, error: number, seconds?: number][],
   day = 1,
 ): Candidate {
-  return { submissionId, handedInAt: new Date(Date.UTC(2026, 0, day)), study: studyOf(runs) };
+  return { submissionId, handedInAt: new Date(Date.UTC(2026, 0, day)), study: studyOf(runs), barredBy: null };
 }
 
 const ranksOf = (candidates: Candidate[], tolerance: number) =>
@@ -80,6 +80,15 @@ describe("ranking at a tolerance", () => {
     ]);
     expect(notReached.map((row) => [row.candidate.submissionId, row.reason])).toEqual([
       ["silent", "noDeclaredCost"],
+    ]);
+  });
+
+  it("names why a study that does not rank on this measure has no rank", () => {
+    const barred: Candidate = { ...candidate("exact", [[8, 0]]), barredBy: "exactAtNodes" };
+    const { reached, notReached } = rankStudies([barred], 1e-3, "nodes");
+    expect(reached).toEqual([]);
+    expect(notReached.map((row) => [row.candidate.submissionId, row.reason])).toEqual([
+      ["exact", "exactAtNodes"],
     ]);
   });
 });
