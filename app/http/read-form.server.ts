@@ -18,11 +18,12 @@ export async function readForm<Schema extends z.ZodType>(
   throw invalid("The form is not complete.", fields);
 }
 
-/** The given texts but for passwords. */
+/** The given texts but for passwords; a name that comes twice with its texts joined by commas. */
 export async function valuesToShowAgain(request: Request): Promise<Record<string, string>> {
   const values: Record<string, string> = {};
   for (const [name, value] of await readFields(request)) {
-    if (typeof value === "string" && !/password/i.test(name)) values[name] = value;
+    if (typeof value !== "string" || /password/i.test(name)) continue;
+    values[name] = name in values ? `${values[name]},${value}` : value;
   }
   return values;
 }
