@@ -144,6 +144,9 @@ function writeArithmetic(node: Extract<ExpressionNode, { kind: "arithmetic" }>):
     };
   }
   if (sign === "/") {
+    if (left.kind === "negative") {
+      return { latex: `-${writeArithmetic({ ...node, left: left.arg }).latex}`, binding: Binding.Sign };
+    }
     const areNumbers = left.kind === "number" && right.kind === "number";
     const latex = `\\${areNumbers ? "tfrac" : "frac"}{${write(left).latex}}{${write(right).latex}}`;
     return { latex, binding: Binding.Product };
@@ -177,7 +180,7 @@ function writeCall(node: Extract<ExpressionNode, { kind: "call" }>): Typeset {
     case "mod":
       return {
         latex: `(${atLeast(first, Binding.Sum)}) \\bmod ${atLeast(second, Binding.Atom)}`,
-        binding: Binding.Sum,
+        binding: Binding.Loosest,
       };
     case "d":
       return { latex: `${parenthesised(write(first).latex)}_${write(second).latex}`, binding: Binding.Atom };

@@ -22,17 +22,17 @@ const sequences: Record<string, Record<string, number[]>> = {
   "house-fd6": {
     "*": [16, 32, 64, 128, 256],
     "advection-diffusion-gaussian": [32, 64, 128, 256, 512],
-    "helmholtz-periodic-2d": [16, 32, 64, 128],
+    "helmholtz-periodic-2d": [16, 24, 32, 48, 64, 96, 128],
   },
   "house-compact4": {
     "*": [16, 32, 64, 128, 256],
     "advection-diffusion-gaussian": [32, 64, 128, 256, 512],
-    "helmholtz-periodic-2d": [16, 32, 64, 128],
-    "nonlinear-diffusivity": [16, 32, 64, 96, 128],
+    "helmholtz-periodic-2d": [16, 24, 32, 48, 64, 96, 128],
+    "nonlinear-diffusivity": [16, 24, 32, 48, 64, 96, 128],
   },
   "house-compact6": {
-    "*": [16, 32, 64, 128],
-    "advection-diffusion-gaussian": [32, 64, 128, 256],
+    "*": [16, 24, 32, 48, 64, 96, 128],
+    "advection-diffusion-gaussian": [32, 48, 64, 96, 128, 192, 256],
     "nonlinear-diffusivity": [16, 24, 32, 48, 64, 96],
   },
   "house-fourier": {
