@@ -1,28 +1,38 @@
 const heartbeatMs = 15_000;
 
 /**
- * Server-Sent Events: one event of the given name for each value, until the values end or the client leaves. A comment
- * now and then keeps proxies from closing a quiet connection.
+ * Server-Sent Events: one event of the given name for each value, until the values end or the client leaves, of which
+ * the signal tells. A comment now and then keeps proxies from closing a quiet connection.
  */
-export function answerEvents(name: string, values: AsyncGenerator<unknown>, signal: AbortSignal): Response {
+export function answerEvents(
+  name: string,
+  requestSignal: AbortSignal,
+  follow: (signal: AbortSignal) => AsyncGenerator<unknown>,
+): Response {
   const encoder = new TextEncoder();
+  const leaving = new AbortController();
+  const values = follow(AbortSignal.any([requestSignal, leaving.signal]));
   let heartbeat: NodeJS.Timeout;
   const body = new ReadableStream<Uint8Array>({
     start(controller) {
       heartbeat = setInterval(() => controller.enqueue(encoder.encode(": still here\n\n")), heartbeatMs);
-      signal.addEventListener("abort", () => clearInterval(heartbeat), { once: true });
     },
     async pull(controller) {
-      const next = await values.next();
-      if (next.done) {
+      const next = await values.next().catch((error: unknown) => {
         clearInterval(heartbeat);
-        if (!signal.aborted) controller.close();
+        throw error;
+      });
+      if (!next.done) {
+        controller.enqueue(encoder.encode(`event: ${name}\ndata: ${JSON.stringify(next.value)}\n\n`));
         return;
       }
-      controller.enqueue(encoder.encode(`event: ${name}\ndata: ${JSON.stringify(next.value)}\n\n`));
+      clearInterval(heartbeat);
+      // A stream that was cancelled is closed already.
+      if (!leaving.signal.aborted) controller.close();
     },
     async cancel() {
       clearInterval(heartbeat);
+      leaving.abort();
       await values.return(undefined);
     },
   });

@@ -15,16 +15,15 @@ export interface Progress {
 }
 
 /**
- * The progress of a submission now and after each change, until the signal aborts. An event only says that something
+ * What follows the progress of a submission: now and after each change, until its signal aborts. An event only says that something
  * changed; what is reported is read anew, so that neither a lost event nor their order can make it wrong.
  */
 export async function watchSubmission(
   viewer: Viewer,
   id: string,
-  signal: AbortSignal,
-): Promise<AsyncGenerator<Progress>> {
+): Promise<(signal: AbortSignal) => AsyncGenerator<Progress>> {
   const guarded = await findGuarded(viewer, id);
-  return followProgress(guarded.id, signal);
+  return (signal) => followProgress(guarded.id, signal);
 }
 
 async function* followProgress(submissionId: string, signal: AbortSignal): AsyncGenerator<Progress> {

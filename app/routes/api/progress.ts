@@ -6,6 +6,6 @@ import type { Route } from "./+types/progress";
 
 export const loader = ({ request, params, context }: Route.LoaderArgs) =>
   answerApi(async () => {
-    const progress = await watchSubmission(context.get(viewerContext), params.id, request.signal);
-    return answerEvents("progress", progress, request.signal);
+    const follow = await watchSubmission(context.get(viewerContext), params.id);
+    return answerEvents("progress", request.signal, follow);
   });
