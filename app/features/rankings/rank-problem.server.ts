@@ -13,10 +13,16 @@ import type { RankingQuery } from "./ranking-query";
 
 const mostNotReached = 200;
 const mostCurves = 200;
-const samplesPerCurve = 96;
+/** Fewer places a curve where there are many, so that a crowded chart does not make a heavy page. */
+const mostSamples = 4800;
 
 /** The listed submissions of a problem's current revision, ranked at a tolerance from their stored studies. */
-export async function rankProblem(_viewer: Viewer, slug: string, query: RankingQuery): Promise<Ranking> {
+export async function rankProblem(
+  _viewer: Viewer,
+  slug: string,
+  query: RankingQuery,
+  { withCurves = true }: { withCurves?: boolean } = {},
+): Promise<Ranking> {
   const revision = await findRevision(slug, null);
   const candidates = await loadCandidates(revision.revisionId, query);
   // Ranks are among all; the filter only chooses what is shown.
@@ -37,7 +43,7 @@ export async function rankProblem(_viewer: Viewer, slug: string, query: RankingQ
     notReached: notReached.slice(0, mostNotReached).map(toNotReachedRow),
     total: reached.length,
     nextCursor: hasMore ? encodeCursor(sortKeyOf(page[page.length - 1])) : null,
-    curves: [...reached, ...notReached].slice(0, mostCurves).map(({ candidate }) => toCurve(candidate)),
+    curves: withCurves ? toCurves([...reached, ...notReached]) : [],
   };
 }
 
@@ -125,12 +131,18 @@ function toNotReachedRow({ candidate, smallestError, reason, at }: NotReached<Li
   return { ...toRanked(candidate), smallestError, reason, at };
 }
 
-function toCurve({ submissionId, solver, version, family, study }: Listed): RankingCurve {
+function toCurves(rows: { candidate: Listed }[]): RankingCurve[] {
+  const drawn = rows.slice(0, mostCurves);
+  const samples = Math.max(24, Math.min(96, Math.floor(mostSamples / drawn.length)));
+  return drawn.map(({ candidate }) => toCurve(candidate, samples));
+}
+
+function toCurve({ submissionId, solver, version, family, study }: Listed, samples: number): RankingCurve {
   return {
     submissionId,
     label: `${solver.name} ${version}`,
     family,
     points: study.points.map(({ n, nodes, intervals, error }) => ({ n, nodes, intervals, error })),
-    line: curvePoints(study, samplesPerCurve),
+    line: curvePoints(study, samples),
   };
 }

@@ -1,12 +1,11 @@
 import { createHash } from "node:crypto";
 import { db } from "@/app/platform/db.server";
-import type { Viewer } from "../accounts/viewer";
+import type { Account, Viewer } from "../accounts/viewer";
 import { findRevision } from "../problems/find-revision.server";
 import { scorePart, type FileBytes, type ScoreAnswer } from "../scoring/score-files.server";
 import { parsePart } from "./parse-part";
 import { planSubmission, requireSubmitter } from "./receive-submission.server";
 import { submissionPart, type SubmissionPart } from "./submission-form";
-import type { Account } from "../accounts/viewer";
 
 /** Carries a dry run's result out of the transaction that is rolled back. */
 class RolledBack<R> extends Error {

@@ -9,6 +9,6 @@ import type { Route } from "./+types/ranking";
 export const loader = ({ request, params, context }: Route.LoaderArgs) =>
   answerApi(async () => {
     const query = parseRankingQuery(new URL(request.url).searchParams);
-    const ranking = await rankProblem(context.get(viewerContext), params.slug, query);
+    const ranking = await rankProblem(context.get(viewerContext), params.slug, query, { withCurves: false });
     return answerRead(request, toRankingJson(ranking), { csv: () => toRankingCsv(ranking) });
   });
