@@ -22,13 +22,19 @@ const sessionCookie = createCookie(isSecure ? "__Host-session" : "session", {
   maxAge: sessionLifetimeSeconds,
 });
 
-export const authenticator = new Authenticator<{ userId: string }>().use(
+const authenticator = new Authenticator<{ userId: string }>().use(
   new FormStrategy(async ({ request }) => {
     const input = await readForm(request, signInForm);
     return checkCredentials({ ...input, address: clientAddressOf(request) });
   }),
   "form",
 );
+
+/** Whose credentials the posted form holds. */
+export async function authenticate(request: Request): Promise<{ userId: string }> {
+  // The authenticator uses the body up, which the refused form still needs.
+  return authenticator.authenticate("form", request.clone());
+}
 
 /** The secret that the cookie carries, as it came: only the database knows whether it is a session's. */
 export async function sessionSecretOf(request: Request): Promise<string | null> {

@@ -1,7 +1,7 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import { ensureAccount } from "@/app/features/accounts/ensure-account.server";
 import { viewerOfSession } from "@/app/features/accounts/sessions.server";
-import { authenticator, sessionSecretOf, signIn, signOut } from "@/app/http/session.server";
+import { authenticate, sessionSecretOf, signIn, signOut } from "@/app/http/session.server";
 import { useDatabase } from "../support/database";
 
 useDatabase();
@@ -27,16 +27,16 @@ function withCookie(headers: HeadersInit): { request: Request; setCookie: string
 
 describe("the form strategy", () => {
   it("answers whose credentials the form holds", async () => {
-    expect(await authenticator.authenticate("form", post({ email: " INES@example.org", password }))).toEqual({
+    expect(await authenticate(post({ email: " INES@example.org", password }))).toEqual({
       userId,
     });
   });
 
   it("refuses a wrong password and an empty form with the errors of the use-case", async () => {
-    await expect(authenticator.authenticate("form", post({ email, password: "x" }))).rejects.toMatchObject({
+    await expect(authenticate(post({ email, password: "x" }))).rejects.toMatchObject({
       kind: "invalid",
     });
-    await expect(authenticator.authenticate("form", post({}))).rejects.toMatchObject({
+    await expect(authenticate(post({}))).rejects.toMatchObject({
       details: { fields: { email: expect.any(String), password: expect.any(String) } },
     });
   });
