@@ -1,6 +1,6 @@
 /** Local polynomial reconstruction from the nodes nearest a place. */
 
-import { localWeights } from "./local-weights";
+import { fornbergWeights } from "./fornberg-weights";
 
 /** Weights of consecutive values from `first` on; indices wrap on a periodic axis. */
 export interface LocalStencil {
@@ -73,13 +73,13 @@ export function piecewiseStencil(source: PiecewiseSource, at: number): LocalSten
   if (!edges) {
     const first = centredStart(source, at, count);
     const local = Float64Array.from({ length: count }, (_, k) => entryAt(nodes, first + k, n, period));
-    return { first, weights: localWeights(at, local, 0) };
+    return { first, weights: fornbergWeights(0, at, local) };
   }
   const cell = lastAtOrBelow(edges, at);
   const wanted = cell - Math.floor((count - 1) / 2);
   const first = period === null ? Math.max(0, Math.min(wanted, n - count)) : wanted;
   const local = Float64Array.from({ length: count + 1 }, (_, k) => entryAt(edges, first + k, n, period));
-  const onEdges = localWeights(at, local, 1);
+  const onEdges = fornbergWeights(1, at, local);
   const weights = new Float64Array(count);
   let above = 0;
   for (let j = count - 1; j >= 0; j--) {

@@ -7,7 +7,7 @@ import {
   polynomialSlopeWeights,
   polynomialValueWeights,
 } from "../interpolation/barycentric";
-import { localWeights } from "../interpolation/local-weights";
+import { fornbergWeights } from "../interpolation/fornberg-weights";
 import type { GridValues } from "../norms/error-norms";
 import type { BoundaryCondition, ProblemDefinition } from "../problems/definition";
 import { contextOf, parameterValues } from "../problems/problem-context";
@@ -33,7 +33,7 @@ function stencilOfAverages(axis: RunAxis, at: number, isLeft: boolean): EndStenc
   const first = isLeft ? 0 : axis.n - cells;
   const local = edges.slice(first, first + cells + 1);
   const onCells = (derivative: number) => {
-    const onEdges = localWeights(at, local, derivative);
+    const onEdges = fornbergWeights(derivative, at, local);
     const weights = new Float64Array(cells);
     let above = 0;
     for (let j = cells - 1; j >= 0; j--) {
@@ -59,7 +59,7 @@ function stencilAt(axis: RunAxis, end: "a" | "b", declaration: Declaration): End
   const count = Math.min(Math.max(wanted, 2), axis.n);
   const first = isLeft ? 0 : axis.n - count;
   const nodes = axis.nodes.slice(first, first + count);
-  return { first, value: localWeights(at, nodes, 0), slope: localWeights(at, nodes, 1) };
+  return { first, value: fornbergWeights(0, at, nodes), slope: fornbergWeights(1, at, nodes) };
 }
 
 /** An expression of a condition along an end: one value for each node of the other axis, or one in 1-D. */

@@ -86,9 +86,9 @@ function largestGap(run: RunFields): number | null {
  * @param problem the test problem
  * @param run the run on its grid
  * @param file arrays as read
- * @param measured what the scoring of the run knows: intervals, u* of the first field at its nodes, weights, norms
+ * @param measured what the scoring of the run knows: intervals, u* of the first field at its nodes, norms
  * @returns facts, each null where it does not apply
- * @example readFacts(problem, run, file, { intervals, exact, weights, norms, exactMax, values: "point" })
+ * @example readFacts(problem, run, file, { intervals, exact, norms, exactMax, values: "point" })
  * @see the page /scoring, "Findings"
  */
 export function readFacts(
@@ -98,7 +98,6 @@ export function readFacts(
   measured: {
     intervals: readonly number[];
     exact: GridValues;
-    weights: Float64Array[];
     norms: Norms;
     exactMax: number;
     values: "point" | "cellAverage";
@@ -126,7 +125,7 @@ export function readFacts(
     errorOverMax,
     interpolantError: equalsExact ? interpolantError(problem, run, exact, exactMax) : null,
     endIncludedError: isMistakable ? endIncludedError(problem, run) : null,
-    transposedError: isMistakable ? transposedError(run, exact, measured.weights) : null,
+    transposedError: isMistakable ? transposedError(run, exact) : null,
     timeShift: isMistakable ? findTimeShift(problem, run) : null,
     largestGap: largestGap(run),
     sample: sampleValues(run, measured.intervals),

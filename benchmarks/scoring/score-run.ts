@@ -134,7 +134,7 @@ export function scoreRun(
   const exactMax = Math.max(...levels.map(({ sums }) => sums.exactMax));
   const split = splitMaximum(fields, levels);
   const norms = times[times.length - 1].nodes;
-  const facts = { intervals, exact: first.exact, weights, norms, exactMax, values: declaration.values };
+  const facts = { intervals, exact: first.exact, norms, exactMax, values: declaration.values };
   return {
     n: [...run.n],
     nodes,

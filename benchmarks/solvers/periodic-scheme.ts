@@ -1,5 +1,5 @@
 import { inverseFourierTransform, modeNumbers } from "../transforms/fourier-transform";
-import { centredWeights } from "./fornberg-weights";
+import { centredWeights } from "../interpolation/fornberg-weights";
 
 /** How a discretisation differentiates on a uniform periodic grid, told by what it does to each mode. */
 export interface PeriodicScheme {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 
-import { fornbergWeights } from "@/benchmarks/solvers/fornberg-weights";
+import { fornbergWeights } from "@/benchmarks/interpolation/fornberg-weights";
 
 /**
  * B. Fornberg, Generation of finite difference formulas on arbitrarily spaced grids, Math. Comp. 51 (1988) 699-706,

@@ -5,12 +5,9 @@ import {
   polynomialSlopeWeights,
   polynomialValueWeights,
 } from "@/benchmarks/interpolation/barycentric";
-import { localWeights } from "@/benchmarks/interpolation/local-weights";
 import { reconstructLines, type LineAxis } from "@/benchmarks/interpolation/reconstruct-lines";
 import { cellEdges } from "@/benchmarks/quadrature/cell-widths";
 import type { GridKind } from "@/benchmarks/grids/grid-kind";
-
-const eps = 2 ** -52;
 
 function axisOf(
   kind: GridKind,
@@ -29,25 +26,6 @@ const offsets = (m: number, a: number, b: number) =>
 
 const largest = (got: Float64Array, expected: (i: number) => number) =>
   got.reduce((most, value, i) => Math.max(most, Math.abs(value - expected(i))), 0);
-
-describe("local weights", () => {
-  it("are the published finite-difference weights", () => {
-    // Source: Fornberg 1988, Math. Comp. 51, 699-706 (table contents from memory, checked by moment conditions).
-    const centred = [...localWeights(0, Float64Array.of(-2, -1, 0, 1, 2), 1)];
-    [1 / 12, -2 / 3, 0, 2 / 3, -1 / 12].forEach((w, j) =>
-      expect(Math.abs(centred[j] - w)).toBeLessThanOrEqual(4 * eps),
-    );
-    const oneSided = localWeights(0, Float64Array.of(0, 1, 2, 3, 4, 5, 6), 1);
-    [-49 / 20, 6, -15 / 2, 20 / 3, -15 / 4, 6 / 5, -1 / 6].forEach((w, j) =>
-      expect(Math.abs(oneSided[j] - w)).toBeLessThanOrEqual(64 * eps),
-    );
-    expect([...localWeights(0, Float64Array.of(-1, 0, 1), 2)]).toEqual([1, -2, 1]);
-  });
-
-  it("need more nodes than the derivative they take", () => {
-    expect(() => localWeights(0, Float64Array.of(0, 1), 2)).toThrow(RangeError);
-  });
-});
 
 describe("the global polynomial", () => {
   it("through Chebyshev nodes has the published errors for the Runge function", () => {
