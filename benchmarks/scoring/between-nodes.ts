@@ -27,8 +27,21 @@ export function betweenPointCount(finest: number, dimension: number): number {
 }
 
 /**
+ * Nodes along each axis of the finest runs: the largest n of any run along that axis.
+ *
+ * @example finestNodes([{ n: [16, 32] }, { n: [32, 16] }]) // [32, 32]
+ * @see the page /scoring, "Between nodes"
+ */
+export function finestNodes(runs: readonly { n: readonly number[] }[]): number[] {
+  return (runs[0]?.n ?? []).map((_, axis) => Math.max(...runs.map((run) => run.n[axis])));
+}
+
+/**
  * The reconstruction along one axis. The two global ones complete each other on problems that are periodic along one
  * axis and bounded along the other.
+ *
+ * @example reconstructionAlong({ isPeriodic: true }, { kind: "polynomial" }).kind // "trigonometric"
+ * @see Canuto et al. 2006, section 2.7 (Fourier in one direction, polynomials in the other)
  */
 export function reconstructionAlong(
   axis: { isPeriodic: boolean },

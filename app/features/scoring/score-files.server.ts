@@ -1,5 +1,6 @@
 import { setImmediate } from "node:timers/promises";
 import { refusedData } from "@/app/platform/errors";
+import { finestNodes } from "@/benchmarks/scoring/between-nodes";
 import { checkDeclaration } from "@/benchmarks/scoring/check-declaration";
 import type { Refusal } from "@/benchmarks/scoring/data-error";
 import type { Finding, RunScore, Study } from "@/benchmarks/scoring/result";
@@ -56,7 +57,13 @@ export async function scorePart(
   for (const [index, run] of runs.entries()) {
     // Between files other requests get their turn.
     await setImmediate();
-    const outcome = scoreBytes(revision.definition, declaration, run, matched[index].bytes);
+    const outcome = scoreBytes(
+      revision.definition,
+      declaration,
+      run,
+      matched[index].bytes,
+      finestNodes(runs),
+    );
     if (outcome.score) scores.push(outcome.score);
     else refused.push(outcome.refusal);
   }

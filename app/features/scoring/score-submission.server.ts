@@ -4,6 +4,7 @@ import { db } from "@/app/platform/db.server";
 import { publish } from "@/app/platform/events.server";
 import { logger } from "@/app/platform/logger.server";
 import { getBytes } from "@/app/platform/storage.server";
+import { finestNodes } from "@/benchmarks/scoring/between-nodes";
 import type { Refusal } from "@/benchmarks/scoring/data-error";
 import type { RunScore } from "@/benchmarks/scoring/result";
 import { scorerVersion } from "@/benchmarks/scoring/scorer-version";
@@ -48,7 +49,8 @@ async function scoreStoredRun(study: StoredStudy, run: StoredRun) {
   if (createHash("sha256").update(bytes).digest("hex") !== run.sha256) {
     throw new Error(`The stored bytes of run ${run.id} do not have the checksum that was taken at upload.`);
   }
-  const outcome = scoreBytes(study.problem, study.declaration, run.declaration, bytes);
+  const finest = finestNodes(study.runs.map((one) => one.declaration));
+  const outcome = scoreBytes(study.problem, study.declaration, run.declaration, bytes, finest);
   await db.transaction(async (tx) => {
     if (outcome.score) {
       await tx
