@@ -70,8 +70,8 @@ export interface RunReading {
   timeShift: { shift: number; factor: number } | null;
   /** A listed grid's largest gap, in units of L/N; null for other kinds. */
   largestGap: number | null;
-  /** Values at every `strides`-th node, for comparing runs at the nodes they share. */
-  sample: { strides: number[]; values: number[] } | null;
+  /** Values and errors at every `strides`-th node, for comparing runs at the nodes they share. */
+  sample: { strides: number[]; values: number[]; errors: number[] } | null;
 }
 
 export type RelativeNormName = "relL1" | "relL2" | "relMax";

@@ -27,8 +27,12 @@ function sampleStride(intervals: number, limit: number): number {
   return intervals;
 }
 
-/** Values at every stride-th node of the first field, real data on grids that share nodes by index. */
-function sampleValues(run: RunFields, intervals: readonly number[]): RunReading["sample"] {
+/** Values and errors at every stride-th node of the first field, real data on grids that share nodes by index. */
+function sampleValues(
+  run: RunFields,
+  intervals: readonly number[],
+  exact: Float64Array,
+): RunReading["sample"] {
   const field = run.fields[0];
   const u = field.times[field.times.length - 1];
   if (u.imaginary || run.axes.some((axis) => axis.kind === "listed")) return null;
@@ -36,11 +40,15 @@ function sampleValues(run: RunFields, intervals: readonly number[]): RunReading[
   const strides = intervals.map((count) => sampleStride(count, limit));
   const [outer, inner] = run.axes.length === 2 ? run.axes : [null, run.axes[0]];
   const values: number[] = [];
-  for (let i = 0; i < (outer?.n ?? 1); i += strides[0]) {
-    for (let j = 0; j < inner.n; j += strides[strides.length - 1]) values.push(u.values[i * inner.n + j]);
-    if (!outer) break;
+  const errors: number[] = [];
+  for (let i = 0; i < (outer?.n ?? 1); i += outer ? strides[0] : 1) {
+    for (let j = 0; j < inner.n; j += strides[strides.length - 1]) {
+      const at = i * inner.n + j;
+      values.push(u.values[at]);
+      errors.push(u.values[at] - exact[at]);
+    }
   }
-  return { strides, values };
+  return { strides, values, errors };
 }
 
 /** Error of the interpolant of u* on a 1-D run's nodes, over max |u*|; null where the grid has no interpolant. */
@@ -128,6 +136,6 @@ export function readFacts(
     transposedError: isMistakable ? transposedError(run, exact) : null,
     timeShift: isMistakable ? findTimeShift(problem, run) : null,
     largestGap: largestGap(run),
-    sample: sampleValues(run, measured.intervals),
+    sample: sampleValues(run, measured.intervals, exact.values),
   };
 }

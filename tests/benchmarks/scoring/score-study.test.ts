@@ -146,6 +146,23 @@ describe("findings about a study", () => {
     expect(codesOf({ u: ofOrder(2), ns: [16, 32, 64] })).not.toContain("subsampled");
   });
 
+  it("do not take agreement at nodes with exact values, as on a boundary, for a selection", () => {
+    const problem = boundedProblem("sin(pi*x)");
+    const grid = { x: { kind: "uniform" as const, descending: false } };
+    const runs = [5, 9, 17].map((n) => {
+      const u = nodesOf("uniform", n, 0, 1).map(
+        (x) => Math.sin(Math.PI * x) + Math.sin(4 * Math.PI * x) / n ** 2,
+      );
+      const run = declareRun([n]);
+      return {
+        declaration: run,
+        score: scoreRun(problem, declare({ grid }), run, fileOf({ u: arrayOf(u) })),
+      };
+    });
+    const { findings } = scoreStudy(problem, declare({ grid }), runs);
+    expect(findings.map(({ code }) => code)).not.toContain("subsampled");
+  });
+
   it("name a periodic grid that was filled with the end node included", () => {
     const given: Given = { u: (x, n) => exact((x * n) / (n - 1)) + n ** -4, ns: [16, 32, 64, 128] };
     expect(codesOf(given)).toContain("end-node-included");
