@@ -39,5 +39,5 @@ export const contentSecurity: MiddlewareFunction<Response> = async ({ context },
   return response;
 };
 
-const isDevelopment = import.meta.env?.DEV === true && import.meta.env.MODE === "development";
+const isDevelopment = import.meta.env.MODE === "development";
 const isSecure = new URL(env.PUBLIC_URL).protocol === "https:";

@@ -1,4 +1,4 @@
-import { RouterContextProvider, createStaticHandler } from "react-router";
+import { type MiddlewareFunction, RouterContextProvider, createStaticHandler } from "react-router";
 import { beforeAll, describe, expect, it } from "vitest";
 import { ensureAccount } from "@/app/features/accounts/ensure-account.server";
 import { answerPage } from "@/app/http/answers.server";
@@ -24,7 +24,7 @@ const router = createStaticHandler([
   {
     id: "root",
     path: "/",
-    middleware: rootMiddleware,
+    middleware: rootMiddleware as MiddlewareFunction[],
     children: [
       {
         id: "who",
