@@ -7,7 +7,8 @@ import type { Route } from "./+types/submission";
 
 export const loader = ({ request, params, context }: Route.LoaderArgs) =>
   answerApi(async () => {
-    const submission = await getSubmission(context.get(viewerContext), params.id);
+    const viewer = context.get(viewerContext);
+    const submission = await getSubmission(viewer, params.id);
     // What a team and the admins see beside it (notes of a review) is not for shared caches.
-    return answerRead(request, toSubmissionJson(submission), { isPrivate: true });
+    return answerRead(request, toSubmissionJson(submission), { isPrivate: viewer !== null });
   });
