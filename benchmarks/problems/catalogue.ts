@@ -1,19 +1,31 @@
 import { advectionDiffusionGaussian } from "./advection-diffusion-gaussian";
 import { advectionExpSine } from "./advection-exp-sine";
+import { advectionVariableSpeed } from "./advection-variable-speed";
 import { boundaryLayer } from "./boundary-layer";
 import { burgersPeriodic } from "./burgers-periodic";
 import type { ProblemDefinition } from "./definition";
 import { heatDirichlet } from "./heat-dirichlet";
 import { heatNeumannRobin } from "./heat-neumann-robin";
 import { helmholtzPeriodic2d } from "./helmholtz-periodic-2d";
+import { kdvSoliton } from "./kdv-soliton";
 import { nonlinearDiffusivity } from "./nonlinear-diffusivity";
 import { poissonMixed2d } from "./poisson-mixed-2d";
+import { schrodingerBrightSoliton } from "./schrodinger-bright-soliton";
+import { sineGordonBreather } from "./sine-gordon-breather";
+import { vorticityConvectedVortex } from "./vorticity-convected-vortex";
+import { wavePoissonKernel } from "./wave-poisson-kernel";
 
 /** The test problems that ship with the register, periodic ones first, by their codes. */
 export const shippedProblems: ProblemDefinition[] = [
   advectionExpSine,
+  advectionVariableSpeed,
   advectionDiffusionGaussian,
   burgersPeriodic,
+  kdvSoliton,
+  schrodingerBrightSoliton,
+  sineGordonBreather,
+  wavePoissonKernel,
+  vorticityConvectedVortex,
   helmholtzPeriodic2d,
   nonlinearDiffusivity,
   heatDirichlet,

@@ -21,7 +21,7 @@ export interface Tolerances {
 }
 
 /** Time errors far below any spatial error of the reference runs. */
-export const tightTolerances: Tolerances = { relative: 1e-12, absolute: 1e-14 };
+export const tightTolerances: Tolerances = { relative: 1e-13, absolute: 1e-15 };
 
 const stages = 12;
 const mostSteps = 2_000_000;

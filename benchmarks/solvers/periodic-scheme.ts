@@ -7,6 +7,8 @@ export interface PeriodicScheme {
   first(theta: number): number;
   /** w2(theta): the second derivative of exp(i theta j) is -w2(theta)/h^2 times it. */
   second(theta: number): number;
+  /** w3(theta): the third derivative of exp(i theta j) is -i w3(theta)/h^3 times it; null where there is no formula. */
+  third: ((theta: number) => number) | null;
   /** Centred weights of an explicit formula; null where every node enters. */
   stencils: { first: Float64Array; second: Float64Array } | null;
 }
@@ -22,9 +24,11 @@ export interface PeriodicScheme {
 export function centralScheme(order: number): PeriodicScheme {
   const first = centredWeights(1, order);
   const second = centredWeights(2, order);
+  const third = centredWeights(3, order);
   const reach = order / 2;
   return {
     stencils: { first, second },
+    third: (theta) => sum(reach + 1, (m) => -2 * third[reach + 1 + m] * Math.sin(m * theta)),
     first: (theta) => sum(reach, (m) => 2 * first[reach + m] * Math.sin(m * theta)),
     // 1 - cos as a squared sine keeps the digits of long waves.
     second: (theta) => sum(reach, (m) => 4 * second[reach + m] * Math.sin((m * theta) / 2) ** 2),
@@ -44,6 +48,7 @@ export function compactScheme(order: 4 | 6): PeriodicScheme {
   const [alpha2, a2, b2] = order === 4 ? [1 / 10, 6 / 5, 0] : [2 / 11, 12 / 11, 3 / 11];
   return {
     stencils: null,
+    third: null,
     first: (theta) =>
       (a * Math.sin(theta) + (b / 2) * Math.sin(2 * theta)) / (1 + 2 * alpha * Math.cos(theta)),
     second: (theta) =>
@@ -59,9 +64,14 @@ export function compactScheme(order: 4 | 6): PeriodicScheme {
  */
 export const fourierScheme: PeriodicScheme = {
   stencils: null,
-  first: (theta) => (Math.abs(theta) >= Math.PI * (1 - 1e-12) ? 0 : theta),
+  third: (theta) => (isHighest(theta) ? 0 : theta ** 3),
+  first: (theta) => (isHighest(theta) ? 0 : theta),
   second: (theta) => theta * theta,
 };
+
+function isHighest(theta: number): boolean {
+  return Math.abs(theta) >= Math.PI * (1 - 1e-12);
+}
 
 function sum(last: number, term: (m: number) => number): number {
   let total = 0;
@@ -88,11 +98,21 @@ export class CirculantOperator {
 
   apply(u: Float64Array, out: Float64Array): void {
     const { n, weights, reach, extended } = this;
-    for (let j = 0; j < extended.length; j++) extended[j] = u[(((j - reach) % n) + n) % n];
+    extended.set(u, reach);
+    for (let j = 0; j < reach; j++) extended[j] = u[n - reach + j];
+    for (let j = n + reach; j < extended.length; j++) extended[j] = u[j - n - reach];
+    const whole = weights.length - (weights.length % 4);
     for (let j = 0; j < n; j++) {
-      let total = 0;
-      for (let m = 0; m < weights.length; m++) total += weights[m] * extended[j + m];
-      out[j] = total;
+      // Four sums side by side: one alone would wait for each addition.
+      let [a, b, c, d] = [0, 0, 0, 0];
+      for (let m = 0; m < whole; m += 4) {
+        a += weights[m] * extended[j + m];
+        b += weights[m + 1] * extended[j + m + 1];
+        c += weights[m + 2] * extended[j + m + 2];
+        d += weights[m + 3] * extended[j + m + 3];
+      }
+      for (let m = whole; m < weights.length; m++) a += weights[m] * extended[j + m];
+      out[j] = a + c + (b + d);
     }
   }
 }
@@ -131,7 +151,24 @@ export function periodicOperators(
     angles.map((theta) => -scheme.second(theta) / (h * h)),
     null,
   ).re;
+  return { first: operatorOfColumn(first), second: operatorOfColumn(second) };
+}
+
+/** Weights of a compact scheme fall off exponentially; those at round-off are left out. */
+function operatorOfColumn(column: Float64Array): CirculantOperator {
+  const n = column.length;
+  const most = Math.floor((n - 1) / 2);
+  const smallest = 4e-16 * column.reduce((largest, value) => Math.max(largest, Math.abs(value)), 0);
   // The inverse transform gives the column; the row runs the other way round.
-  const row = (column: Float64Array) => column.map((_, m) => column[(n - m) % n]);
-  return { first: new CirculantOperator(n, row(first), 0), second: new CirculantOperator(n, row(second), 0) };
+  const weight = (m: number) => column[((-m % n) + n) % n];
+  let reach = most;
+  while (reach > 0 && Math.abs(weight(reach)) < smallest && Math.abs(weight(-reach)) < smallest) reach -= 1;
+  // An even number of nodes has one more weight, half-way round.
+  const isWhole = reach === most;
+  const length = isWhole ? n : 2 * reach + 1;
+  return new CirculantOperator(
+    n,
+    Float64Array.from({ length }, (_, k) => weight(k - reach)),
+    reach,
+  );
 }

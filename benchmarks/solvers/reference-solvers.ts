@@ -3,6 +3,9 @@ import type { ProblemDefinition } from "../problems/definition";
 import { type BoundedScheme, chebyshevScheme, secondOrderScheme } from "./bounded-scheme";
 import { centralScheme, compactScheme, fourierScheme, type PeriodicScheme } from "./periodic-scheme";
 import type { ProblemSolver, ReferenceSolver, SolvedRun } from "./reference-solver";
+import { solveKortewegDeVries, solveSchroedinger } from "./solve-dispersive";
+import { solveSineGordon, solveVariableAdvection, solveWave } from "./solve-periodic-waves";
+import { solveVorticity } from "./solve-vorticity";
 import { solveBoundaryLayer, solveHeat, solveMixedPoisson } from "./solve-bounded";
 import { solveAdvectionDiffusion, solvePeriodicHelmholtz } from "./solve-periodic-linear";
 import { solveBurgers, solveNonlinearDiffusion } from "./solve-periodic-nonlinear";
@@ -14,6 +17,20 @@ const periodicSolvers: Record<string, ProblemSolver<PeriodicScheme>> = {
   "burgers-periodic": solveBurgers,
   "helmholtz-periodic-2d": solvePeriodicHelmholtz,
   "nonlinear-diffusivity": solveNonlinearDiffusion,
+  "advection-variable-speed": solveVariableAdvection,
+  "schrodinger-bright-soliton": solveSchroedinger,
+  "sine-gordon-breather": solveSineGordon,
+  "wave-poisson-kernel": solveWave,
+};
+
+/** Needs a formula for the third derivative, which the compact schemes here lack. */
+const thirdDerivativeSolvers: Record<string, ProblemSolver<PeriodicScheme>> = {
+  "kdv-soliton": solveKortewegDeVries,
+};
+
+/** Fourier collocation carries its one mode exactly on every grid, so that there is no convergence to show. */
+const singleModeSolvers: Record<string, ProblemSolver<PeriodicScheme>> = {
+  "vorticity-convected-vortex": solveVorticity,
 };
 
 const boundedSolvers: Record<string, ProblemSolver<BoundedScheme>> = {
@@ -72,12 +89,15 @@ function solving(
   };
 }
 
-function onPeriodicGrids(scheme: PeriodicScheme): Capability {
-  return capability(periodicSolvers, scheme, "uniform-periodic");
+function onPeriodicGrids(
+  scheme: PeriodicScheme,
+  ...tables: Record<string, ProblemSolver<PeriodicScheme>>[]
+): Capability {
+  return capability(Object.assign({}, periodicSolvers, ...tables), scheme, "uniform-periodic");
 }
 
 function centralSolver(order: 2 | 4 | 6): ReferenceSolver {
-  const periodic = onPeriodicGrids(centralScheme(order));
+  const periodic = onPeriodicGrids(centralScheme(order), thirdDerivativeSolvers, singleModeSolvers);
   const bounded = capability(boundedSolvers, secondOrderScheme, "uniform");
   const closures =
     "Fluxes of a variable diffusivity are taken at half points; ghost points close ends with a derivative condition.";
@@ -88,33 +108,33 @@ function centralSolver(order: 2 | 4 | 6): ReferenceSolver {
     method: `Explicit central differences of order ${order} on a uniform grid`,
     formalOrder: order,
     claim: { kind: "algebraic", order },
-    description: `Method of lines with explicit central differences of order ${order}. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with a tolerance of 1e-12. ${order === 2 ? closures : "A diffusive flux is the first difference applied twice."}`,
+    description: `Method of lines with explicit central differences of order ${order}. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with steps that keep the time error far below the spatial one. ${order === 2 ? closures : "A diffusive flux is the first difference applied twice."}`,
     reconstruction: { kind: "piecewise-polynomial", degree: order + 1 },
   };
 }
 
 function compactSolver(order: 4 | 6): ReferenceSolver {
   return {
-    ...solving(`house-compact${order}`, [onPeriodicGrids(compactScheme(order))]),
+    ...solving(`house-compact${order}`, [onPeriodicGrids(compactScheme(order), singleModeSolvers)]),
     name: `Compact differences, order ${order}`,
     family: "compactDifference",
     method: `Tridiagonal compact differences of order ${order} (Lele 1992)`,
     formalOrder: order,
     claim: { kind: "algebraic", order },
-    description: `Method of lines with Lele's tridiagonal schemes of order ${order} for the first and the second derivative. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with a tolerance of 1e-12.`,
+    description: `Method of lines with Lele's tridiagonal schemes of order ${order} for the first and the second derivative. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with steps that keep the time error far below the spatial one.`,
     reconstruction: { kind: "piecewise-polynomial", degree: order + 1 },
   };
 }
 
 const fourierSolver: ReferenceSolver = {
-  ...solving("house-fourier", [onPeriodicGrids(fourierScheme)]),
+  ...solving("house-fourier", [onPeriodicGrids(fourierScheme, thirdDerivativeSolvers)]),
   name: "Fourier pseudo-spectral",
   family: "fourier",
   method: "Fourier collocation without dealiasing",
   formalOrder: null,
   claim: { kind: "exponential" },
   description:
-    "Fourier collocation on uniform nodes, products formed at the nodes without dealiasing. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with a tolerance of 1e-12.",
+    "Fourier collocation on uniform nodes, products formed at the nodes without dealiasing. Linear problems are exact in time; the others use an embedded Runge-Kutta method of order 8 with steps that keep the time error far below the spatial one.",
   reconstruction: { kind: "trigonometric" },
 };
 

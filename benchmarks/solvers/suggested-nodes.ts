@@ -5,6 +5,12 @@ const doubling = [16, 32, 64, 128, 256, 512];
 const sequences: Record<string, Record<string, number[]>> = {
   "house-fd2": {
     "*": doubling,
+    "advection-variable-speed": [128, 192, 256, 384, 512, 768],
+    "kdv-soliton": [64, 96, 128, 192, 256],
+    "schrodinger-bright-soliton": [128, 192, 256, 384, 512],
+    "sine-gordon-breather": [128, 192, 256, 384, 512, 768],
+    "vorticity-convected-vortex": [8, 12, 16, 24, 32, 48],
+
     "advection-diffusion-gaussian": [32, 64, 128, 256, 512, 1024],
     "helmholtz-periodic-2d": [16, 32, 64, 128, 256],
     "nonlinear-diffusivity": [16, 32, 64, 128, 256],
@@ -15,28 +21,56 @@ const sequences: Record<string, Record<string, number[]>> = {
   },
   "house-fd4": {
     "*": doubling,
+    "advection-variable-speed": [128, 192, 256, 384, 512, 768],
+    "kdv-soliton": [64, 96, 128, 192, 256],
+    "schrodinger-bright-soliton": [128, 192, 256, 384, 512],
+    "sine-gordon-breather": [128, 192, 256, 384, 512, 768],
+    "vorticity-convected-vortex": [8, 12, 16, 24, 32, 48],
+
     "advection-diffusion-gaussian": [32, 64, 128, 256, 512, 1024],
     "helmholtz-periodic-2d": [16, 32, 64, 128, 256],
     "nonlinear-diffusivity": [16, 32, 64, 128, 256],
   },
   "house-fd6": {
     "*": [16, 32, 64, 128, 256],
+    "advection-variable-speed": [128, 160, 192, 256, 384],
+    "kdv-soliton": [96, 128, 160, 192, 256],
+    "schrodinger-bright-soliton": [128, 160, 192, 256, 384],
+    "sine-gordon-breather": [128, 192, 256, 384, 512],
+    "vorticity-convected-vortex": [8, 10, 12, 16, 20, 24],
+
     "advection-diffusion-gaussian": [32, 64, 128, 256, 512],
     "helmholtz-periodic-2d": [16, 24, 32, 48, 64, 96, 128],
   },
   "house-compact4": {
     "*": [16, 32, 64, 128, 256],
+    "advection-variable-speed": [128, 160, 192, 256, 384],
+    "schrodinger-bright-soliton": [128, 160, 192, 256, 384],
+    "sine-gordon-breather": [128, 192, 256, 384, 512],
+    "vorticity-convected-vortex": [8, 10, 12, 16, 20, 24],
+
     "advection-diffusion-gaussian": [32, 64, 128, 256, 512],
     "helmholtz-periodic-2d": [16, 24, 32, 48, 64, 96, 128],
     "nonlinear-diffusivity": [16, 24, 32, 48, 64, 96, 128],
   },
   "house-compact6": {
     "*": [16, 24, 32, 48, 64, 96, 128],
+    "advection-variable-speed": [128, 160, 192, 256, 384],
+    "schrodinger-bright-soliton": [128, 160, 192, 256, 384],
+    "sine-gordon-breather": [128, 192, 256, 384, 512],
+    "vorticity-convected-vortex": [8, 10, 12, 16, 20, 24],
+
     "advection-diffusion-gaussian": [32, 48, 64, 96, 128, 192, 256],
     "nonlinear-diffusivity": [16, 24, 32, 48, 64, 96],
   },
   "house-fourier": {
     "*": [8, 10, 12, 14, 16, 18, 20, 22, 24, 28, 32],
+    "advection-variable-speed": [96, 112, 128, 144, 160, 176, 192, 208],
+    "kdv-soliton": [64, 80, 96, 112, 128, 144, 160],
+    "schrodinger-bright-soliton": [96, 128, 160, 192, 224, 256, 288],
+    "sine-gordon-breather": [128, 160, 192, 224, 256, 288, 320],
+    "wave-poisson-kernel": [8, 12, 16, 20, 24, 28, 32, 36, 40, 48],
+
     "advection-diffusion-gaussian": [8, 10, 12, 14, 16, 18, 20, 22, 24, 28, 32, 36, 40, 48],
     "burgers-periodic": [12, 16, 20, 24, 28, 32, 36, 40, 48, 56, 64, 72, 80],
     "nonlinear-diffusivity": [12, 16, 20, 24, 28, 32, 36, 40, 48],
@@ -54,7 +88,7 @@ const sequences: Record<string, Record<string, number[]>> = {
   },
 };
 
-const planar = new Set(["helmholtz-periodic-2d", "poisson-mixed-2d"]);
+const planar = new Set(["helmholtz-periodic-2d", "poisson-mixed-2d", "vorticity-convected-vortex"]);
 
 /**
  * Nodes along each axis for each grid of a reference solver's study on a problem.

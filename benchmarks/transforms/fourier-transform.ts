@@ -1,17 +1,9 @@
-import FFT from "fft.js";
+import { BluesteinPlan } from "./bluestein-plan";
+import type { ComplexArray, FourierPlan } from "./fourier-plan";
+import { MixedRadixPlan, smallFactors } from "./mixed-radix-plan";
+import { PowerOfTwoPlan } from "./power-of-two-plan";
 
-/** Complex values as two arrays of the same length. */
-export interface ComplexArray {
-  re: Float64Array;
-  im: Float64Array;
-}
-
-/** Transforms of one length, with what they need computed once. */
-interface Plan {
-  forward(re: Float64Array, im: Float64Array): ComplexArray;
-}
-
-const plans = new Map<number, Plan>();
+const plans = new Map<number, FourierPlan>();
 const mostPlans = 64;
 
 /**
@@ -108,92 +100,24 @@ function scaled(values: Float64Array, factor: number): Float64Array {
   return values;
 }
 
-function planOf(n: number): Plan {
+function planOf(n: number): FourierPlan {
   const found = plans.get(n);
   if (found) return found;
   if (plans.size >= mostPlans) plans.clear();
-  const isPowerOfTwo = (n & (n - 1)) === 0;
-  const plan = n === 1 ? new CopyPlan() : isPowerOfTwo ? new PowerOfTwoPlan(n) : new BluesteinPlan(n);
+  const plan = makePlan(n);
   plans.set(n, plan);
   return plan;
 }
 
-class CopyPlan implements Plan {
+function makePlan(n: number): FourierPlan {
+  if (n === 1) return new CopyPlan();
+  if ((n & (n - 1)) === 0) return new PowerOfTwoPlan(n);
+  const factors = smallFactors(n);
+  return factors ? new MixedRadixPlan(n, factors) : new BluesteinPlan(n);
+}
+
+class CopyPlan implements FourierPlan {
   forward(re: Float64Array, im: Float64Array): ComplexArray {
     return { re: re.slice(), im: im.slice() };
-  }
-}
-
-class PowerOfTwoPlan implements Plan {
-  private readonly fft: FFT;
-  private readonly input: number[];
-  private readonly output: number[];
-
-  constructor(private readonly n: number) {
-    this.fft = new FFT(n);
-    this.input = this.fft.createComplexArray();
-    this.output = this.fft.createComplexArray();
-  }
-
-  forward(re: Float64Array, im: Float64Array): ComplexArray {
-    const { n, input, output } = this;
-    for (let j = 0; j < n; j++) {
-      input[2 * j] = re[j];
-      input[2 * j + 1] = im[j];
-    }
-    this.fft.transform(output, input);
-    const result = { re: new Float64Array(n), im: new Float64Array(n) };
-    for (let k = 0; k < n; k++) {
-      result.re[k] = output[2 * k];
-      result.im[k] = output[2 * k + 1];
-    }
-    return result;
-  }
-}
-
-/** A transform of any length as a convolution with a chirp, carried out at a power of two. */
-class BluesteinPlan implements Plan {
-  private readonly size: number;
-  private readonly cosine: Float64Array;
-  private readonly sine: Float64Array;
-  private readonly chirp: ComplexArray;
-
-  constructor(private readonly n: number) {
-    this.size = 2 ** Math.ceil(Math.log2(2 * n - 1));
-    this.cosine = new Float64Array(n);
-    this.sine = new Float64Array(n);
-    const re = new Float64Array(this.size);
-    const im = new Float64Array(this.size);
-    for (let j = 0; j < n; j++) {
-      // j^2 modulo 2n keeps the angle small, and with it its rounding.
-      const angle = (Math.PI * ((j * j) % (2 * n))) / n;
-      this.cosine[j] = Math.cos(angle);
-      this.sine[j] = Math.sin(angle);
-      re[j] = re[(this.size - j) % this.size] = this.cosine[j];
-      im[j] = im[(this.size - j) % this.size] = this.sine[j];
-    }
-    this.chirp = fourierTransform(re, im);
-  }
-
-  forward(re: Float64Array, im: Float64Array): ComplexArray {
-    const { n, size, cosine, sine } = this;
-    const a = { re: new Float64Array(size), im: new Float64Array(size) };
-    for (let j = 0; j < n; j++) {
-      a.re[j] = re[j] * cosine[j] + im[j] * sine[j];
-      a.im[j] = im[j] * cosine[j] - re[j] * sine[j];
-    }
-    const spectrum = fourierTransform(a.re, a.im);
-    for (let k = 0; k < size; k++) {
-      const real = spectrum.re[k] * this.chirp.re[k] - spectrum.im[k] * this.chirp.im[k];
-      spectrum.im[k] = spectrum.re[k] * this.chirp.im[k] + spectrum.im[k] * this.chirp.re[k];
-      spectrum.re[k] = real;
-    }
-    const product = inverseFourierTransform(spectrum.re, spectrum.im);
-    const result = { re: new Float64Array(n), im: new Float64Array(n) };
-    for (let k = 0; k < n; k++) {
-      result.re[k] = product.re[k] * cosine[k] + product.im[k] * sine[k];
-      result.im[k] = product.im[k] * cosine[k] - product.re[k] * sine[k];
-    }
-    return result;
   }
 }
