@@ -1,6 +1,9 @@
 import { advectionDiffusionGaussian } from "./advection-diffusion-gaussian";
 import { advectionExpSine } from "./advection-exp-sine";
 import { advectionVariableSpeed } from "./advection-variable-speed";
+import { fisherFront } from "./fisher-front";
+import { bistableFront } from "./bistable-front";
+import { heatIncompatibleData } from "./heat-incompatible-data";
 import { boundaryLayer } from "./boundary-layer";
 import { burgersPeriodic } from "./burgers-periodic";
 import type { ProblemDefinition } from "./definition";
@@ -32,6 +35,9 @@ export const shippedProblems: ProblemDefinition[] = [
   heatNeumannRobin,
   boundaryLayer,
   poissonMixed2d,
+  fisherFront,
+  bistableFront,
+  heatIncompatibleData,
 ];
 
 /**

@@ -11,21 +11,28 @@ export interface BoundedScheme {
 export const secondOrderScheme: BoundedScheme = { gridKind: "uniform", kind: "secondOrder" };
 export const chebyshevScheme: BoundedScheme = { gridKind: "chebyshev-lobatto", kind: "chebyshev" };
 
-/** alpha u + beta du/dn = 0 at both ends, n outward. */
+/** alpha u + beta du/dn = g at both ends, n outward. */
 export interface EndCoefficients {
   a: { alpha: number; beta: number };
   b: { alpha: number; beta: number };
 }
 
-/** A second derivative with homogeneous end conditions built in. */
+/** Data g of both ends, the lower first. */
+export type EndData = readonly [number, number];
+
+/** A second derivative with the end conditions built in. */
 export interface ClosedOperator {
   /** Indices of the nodes that are unknowns. */
   unknowns: number[];
-  /** The second derivative at the unknowns. */
+  /** The second derivative at the unknowns, but for the part of the data. */
   matrix: DenseMatrix;
-  /** Values at every node from those of the unknowns. */
-  extend(u: Float64Array): Float64Array;
+  /** What a unit of each end's data adds to the second derivative. */
+  dataColumns: readonly [Float64Array, Float64Array];
+  /** Values at every node from those of the unknowns and the data. */
+  extend(u: Float64Array, data?: EndData): Float64Array;
 }
+
+const noData: EndData = [0, 0];
 
 /**
  * The second derivative on [a, b] with the end conditions built in.
@@ -35,7 +42,7 @@ export interface ClosedOperator {
  *
  * @param scheme of the two
  * @param nodes number of nodes, 3 or more
- * @param ends coefficients of the homogeneous conditions
+ * @param ends coefficients of the conditions
  * @returns matrix, unknowns and extension to all nodes
  * @throws RangeError where there are fewer than three nodes
  * @example closedSecondDerivative(secondOrderScheme, 17, 0, 1, ends).unknowns.length // 15 of Dirichlet ends
@@ -70,7 +77,21 @@ function closeByGhosts(nodes: number, a: number, b: number, ends: EndCoefficient
     const { alpha, beta } = i === 0 ? ends.a : ends.b;
     return (-2 - (2 * h * alpha) / beta) / (h * h);
   });
-  return { unknowns, matrix, extend: (u) => placeAt(unknowns, u, nodes) };
+  const column = (end: "a" | "b") => {
+    const { alpha, beta } = ends[end];
+    const out = new Float64Array(unknowns.length);
+    const at = end === "a" ? 0 : unknowns.length - 1;
+    // A ghost value holds 2 h g/beta; a Dirichlet value g/alpha enters at the node beside it.
+    out[at] = beta !== 0 ? 2 / (beta * h) : 1 / (alpha * h * h);
+    return out;
+  };
+  const extend = (u: Float64Array, data = noData) => {
+    const out = placeAt(unknowns, u, nodes);
+    if (ends.a.beta === 0) out[0] = data[0] / ends.a.alpha;
+    if (ends.b.beta === 0) out[last] = data[1] / ends.b.alpha;
+    return out;
+  };
+  return { unknowns, matrix, dataColumns: [column("a"), column("b")], extend };
 }
 
 function placeAt(unknowns: number[], u: Float64Array, nodes: number): Float64Array {
@@ -106,11 +127,19 @@ function closeByElimination(nodes: number, a: number, b: number, ends: EndCoeffi
     (row, column) =>
       entry(row + 1, column + 1) + entry(row + 1, 0) * left[column] + entry(row + 1, last) * right[column],
   );
-  const extend = (u: Float64Array) => {
+  // What a unit of each end's data adds to both end values.
+  const [fromA, fromB] = [
+    { left: s / determinant, right: -r / determinant },
+    { left: -q / determinant, right: p / determinant },
+  ];
+  const column = (ofUnit: { left: number; right: number }) =>
+    Float64Array.from(unknowns, (i) => entry(i, 0) * ofUnit.left + entry(i, last) * ofUnit.right);
+  const extend = (u: Float64Array, data = noData) => {
     const out = placeAt(unknowns, u, nodes);
-    out[0] = left.reduce((total, weight, k) => total + weight * u[k], 0);
-    out[last] = right.reduce((total, weight, k) => total + weight * u[k], 0);
+    const sum = (weights: number[]) => weights.reduce((total, weight, k) => total + weight * u[k], 0);
+    out[0] = sum(left) + fromA.left * data[0] + fromB.left * data[1];
+    out[last] = sum(right) + fromA.right * data[0] + fromB.right * data[1];
     return out;
   };
-  return { unknowns, matrix, extend };
+  return { unknowns, matrix, dataColumns: [column(fromA), column(fromB)], extend };
 }

@@ -83,13 +83,15 @@ export function endCondition(problem: ProblemDefinition, axis: "x" | "y", end: "
   if (!found) throw new RangeError(`${problem.slug} has no condition at end ${end} of ${axis}`);
   const place = endPlace(problem, found);
   const context = contextOf(problem);
-  const value = (text: string, t: number) =>
-    evaluateAtPoint(compileExpression(text, context), { ...parameterValues(problem), ...place, t });
+  const known = { ...parameterValues(problem), ...place };
+  const value = (text: string) =>
+    evaluateAtPoint(compileExpression(text, context), { ...known, t: problem.initialTime });
   const data = compileExpression(found.g, context);
+  const isZero = found.g.trim() === "0";
   return {
-    alpha: value(found.alpha, problem.initialTime),
-    beta: value(found.beta, problem.initialTime),
-    g: (t) => evaluateAtPoint(data, { ...parameterValues(problem), ...place, t }),
+    alpha: value(found.alpha),
+    beta: value(found.beta),
+    g: (t) => (isZero ? 0 : evaluateAtPoint(data, { ...known, t })),
   };
 }
 

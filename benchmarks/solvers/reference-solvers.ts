@@ -6,6 +6,7 @@ import type { ProblemSolver, ReferenceSolver, SolvedRun } from "./reference-solv
 import { solveKortewegDeVries, solveSchroedinger } from "./solve-dispersive";
 import { solveSineGordon, solveVariableAdvection, solveWave } from "./solve-periodic-waves";
 import { solveVorticity } from "./solve-vorticity";
+import { solveBistable, solveFisher } from "./solve-reaction-diffusion";
 import { solveBoundaryLayer, solveHeat, solveMixedPoisson } from "./solve-bounded";
 import { solveAdvectionDiffusion, solvePeriodicHelmholtz } from "./solve-periodic-linear";
 import { solveBurgers, solveNonlinearDiffusion } from "./solve-periodic-nonlinear";
@@ -38,6 +39,9 @@ const boundedSolvers: Record<string, ProblemSolver<BoundedScheme>> = {
   "heat-neumann-robin": solveHeat,
   "boundary-layer": solveBoundaryLayer,
   "poisson-mixed-2d": solveMixedPoisson,
+  "fisher-front": solveFisher,
+  "bistable-front": solveBistable,
+  "heat-incompatible-data": solveHeat,
 };
 
 /** What a solver does with the problems of one table. */

@@ -18,6 +18,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "heat-neumann-robin": [9, 17, 33, 65, 129, 257],
     "boundary-layer": [17, 33, 65, 129, 257, 513, 1025],
     "poisson-mixed-2d": [9, 17, 33, 65, 129],
+    "fisher-front": [21, 41, 81, 161, 321],
+    "bistable-front": [21, 41, 81, 161, 321],
+    "heat-incompatible-data": [9, 17, 33, 65, 129, 257],
   },
   "house-fd4": {
     "*": doubling,
@@ -85,6 +88,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "heat-neumann-robin": [6, 8, 10, 12, 14, 16, 18, 20],
     "boundary-layer": [9, 11, 13, 15, 17, 19, 21, 23, 25, 27, 29, 33, 41],
     "poisson-mixed-2d": [6, 8, 10, 12, 14, 16, 18, 20],
+    "fisher-front": [17, 21, 25, 29, 33, 37, 41, 45, 49, 57, 65],
+    "bistable-front": [13, 17, 21, 25, 29, 33, 37, 41, 45, 49, 57],
+    "heat-incompatible-data": [9, 11, 13, 15, 17, 19, 21, 23, 25, 29],
   },
 };
 

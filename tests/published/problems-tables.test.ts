@@ -379,6 +379,57 @@ const tables: { problem: string; solver: string; rows: Row[] }[] = [
       row(12, 5.2664e-11, 7.105988e-11, 2.028728e-10, 1.421e-10),
     ],
   },
+  {
+    problem: "fisher-front",
+    solver: "house-fd2",
+    rows: [
+      row(80, 0.0018929, 0.00054818, 0.0002381952, 0.0001344),
+      row(320, 0.00011813, 3.430363e-5, 1.503909e-5, 8.411e-6),
+    ],
+  },
+  {
+    problem: "fisher-front",
+    solver: "house-cheb",
+    rows: [
+      row(24, 0.00063484, 0.0001552083, 6.062376e-5, 3.805e-5),
+      row(48, 1.1235e-7, 2.281479e-8, 7.894471e-9, 5.594e-9),
+      row(64, 2.4781e-10, 5.947488e-11, 2.608219e-11, 1.458e-11),
+    ],
+  },
+  {
+    problem: "bistable-front",
+    solver: "house-fd2",
+    rows: [
+      row(40, 0.0044436, 0.001619405, 0.001047789, 0.0005121),
+      row(160, 0.00027575, 0.0001006809, 6.520638e-5, 3.184e-5),
+    ],
+  },
+  {
+    problem: "bistable-front",
+    solver: "house-cheb",
+    rows: [
+      row(16, 0.0053521, 0.001574202, 0.001131083, 0.0004978),
+      row(32, 2.2821e-6, 7.2805e-7, 9.946981e-7, 2.302e-7),
+      row(48, 2.7593e-9, 1.106353e-9, 1.116814e-9, 3.498e-10),
+    ],
+  },
+  {
+    problem: "heat-incompatible-data",
+    solver: "house-fd2",
+    rows: [
+      row(16, 0.0018175, 0.002244921, 0.003634154, 0.00303),
+      row(64, 0.00011489, 0.0001410869, 0.0002335897, 0.0001905),
+      row(128, 2.8715e-5, 3.528134e-5, 5.847961e-5, 4.763e-5),
+    ],
+  },
+  {
+    problem: "heat-incompatible-data",
+    solver: "house-cheb",
+    rows: [
+      row(16, 4.611e-9, 5.702463e-9, 1.056801e-8, 7.698e-9),
+      row(32, 1.1479e-14, 1.749267e-14, 4.019007e-14, 2.361e-14),
+    ],
+  },
 ];
 
 /** Below this the rows sit on round-off or on the time integrator's tolerance and are upper bounds only. */
