@@ -4,6 +4,12 @@ import { advectionVariableSpeed } from "./advection-variable-speed";
 import { fisherFront } from "./fisher-front";
 import { bistableFront } from "./bistable-front";
 import { heatIncompatibleData } from "./heat-incompatible-data";
+import { advectionSquareWave } from "./advection-square-wave";
+import { advectionHat } from "./advection-hat";
+import { diffusivityJump } from "./diffusivity-jump";
+import { pluckedString } from "./plucked-string";
+import { porousMedium2 } from "./porous-medium-2";
+import { porousMedium3 } from "./porous-medium-3";
 import { boundaryLayer } from "./boundary-layer";
 import { burgersPeriodic } from "./burgers-periodic";
 import type { ProblemDefinition } from "./definition";
@@ -31,13 +37,19 @@ export const shippedProblems: ProblemDefinition[] = [
   vorticityConvectedVortex,
   helmholtzPeriodic2d,
   nonlinearDiffusivity,
+  advectionSquareWave,
+  advectionHat,
   heatDirichlet,
   heatNeumannRobin,
   boundaryLayer,
   poissonMixed2d,
   fisherFront,
   bistableFront,
+  porousMedium2,
+  porousMedium3,
+  diffusivityJump,
   heatIncompatibleData,
+  pluckedString,
 ];
 
 /**

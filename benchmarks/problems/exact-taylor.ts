@@ -2,6 +2,7 @@ import { evaluateTaylor, type TaylorValue } from "../expressions/evaluate-taylor
 import type { Series, TaylorSpace } from "../expressions/taylor-space";
 import type { ProblemDefinition } from "./definition";
 import { compileExact } from "./exact-solution";
+import { readDerivativeName } from "./identity-terms";
 import { parameterValues } from "./problem-context";
 
 /** A point of the space-time domain: values of x, y and t as far as the problem has them. */
@@ -45,4 +46,19 @@ export function placeSeries(
 /** The variables of a problem's Taylor space: its axes, and t unless it is steady. */
 export function spaceVariables(problem: ProblemDefinition): string[] {
   return [...problem.axes.map((axis) => axis.name), ...(problem.classification.isSteady ? [] : ["t"])];
+}
+
+/** A field or one of its derivatives as a polynomial; null for another name. */
+export function fieldSeries(
+  name: string,
+  exact: Map<string, TaylorValue>,
+  space: TaylorSpace,
+): Series | null {
+  const isImaginary = name.startsWith("im ");
+  const bare = isImaginary ? name.slice(3) : name;
+  const read = readDerivativeName(bare, [...exact.keys()]) ?? { field: bare, along: [] };
+  const value = exact.get(read.field);
+  if (!value) return null;
+  const series = isImaginary ? (value.im ?? space.constant(0)) : value.re;
+  return read.along.reduce((derivative, direction) => space.differentiate(derivative, direction), series);
 }

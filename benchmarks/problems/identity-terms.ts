@@ -97,18 +97,30 @@ export function parseIdentity(identity: string, context: ExpressionContext): Ide
  * @see parseIdentity
  */
 export function identityTerms(identity: string, context: ExpressionContext): IdentityTerms {
-  const { left, right } = parseIdentity(identity, context);
-  const terms = [...flatten(left, 1), ...flatten(right, -1)];
-  return {
-    compiled: compileTrees(
-      terms.map(({ node }) => node),
-      context,
-    ),
-    signs: terms.map(({ sign }) => sign),
-  };
+  const terms = identityTrees(identity, context);
+  const trees = terms.map(({ node }) => node);
+  return { compiled: compileTrees(trees, context), signs: terms.map(({ sign }) => sign) };
 }
 
-function flatten(node: ExpressionNode, sign: 1 | -1): { node: ExpressionNode; sign: 1 | -1 }[] {
+/**
+ * The terms of left side minus right side as checked trees.
+ *
+ * @throws DataError `expression/...` with the place in the identity
+ * @example identityTrees("u_t = u_xx", context).length // 2
+ * @see identityTerms
+ */
+export function identityTrees(identity: string, context: ExpressionContext): SignedTerm[] {
+  const { left, right } = parseIdentity(identity, context);
+  return [...flatten(left, 1), ...flatten(right, -1)];
+}
+
+/** A term of a sum. */
+export interface SignedTerm {
+  node: ExpressionNode;
+  sign: 1 | -1;
+}
+
+function flatten(node: ExpressionNode, sign: 1 | -1): SignedTerm[] {
   const opposite = sign === 1 ? -1 : 1;
   if (node.kind === "negative") return flatten(node.arg, opposite);
   if (node.kind !== "arithmetic" || (node.sign !== "+" && node.sign !== "-")) return [{ node, sign }];

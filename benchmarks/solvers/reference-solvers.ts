@@ -4,6 +4,12 @@ import { type BoundedScheme, chebyshevScheme, secondOrderScheme } from "./bounde
 import { centralScheme, compactScheme, fourierScheme, type PeriodicScheme } from "./periodic-scheme";
 import type { ProblemSolver, ReferenceSolver, SolvedRun } from "./reference-solver";
 import { solveKortewegDeVries, solveSchroedinger } from "./solve-dispersive";
+import {
+  porousMediumSolver,
+  solveLayeredDiffusion,
+  solveLayeredDiffusionHarmonic,
+  solveString,
+} from "./solve-limited-smoothness";
 import { solveSineGordon, solveVariableAdvection, solveWave } from "./solve-periodic-waves";
 import { solveVorticity } from "./solve-vorticity";
 import { solveBistable, solveFisher } from "./solve-reaction-diffusion";
@@ -22,6 +28,8 @@ const periodicSolvers: Record<string, ProblemSolver<PeriodicScheme>> = {
   "schrodinger-bright-soliton": solveSchroedinger,
   "sine-gordon-breather": solveSineGordon,
   "wave-poisson-kernel": solveWave,
+  "advection-square-wave": solveAdvectionDiffusion,
+  "advection-hat": solveAdvectionDiffusion,
 };
 
 /** Needs a formula for the third derivative, which the compact schemes here lack. */
@@ -42,6 +50,14 @@ const boundedSolvers: Record<string, ProblemSolver<BoundedScheme>> = {
   "fisher-front": solveFisher,
   "bistable-front": solveBistable,
   "heat-incompatible-data": solveHeat,
+  "diffusivity-jump": solveLayeredDiffusion,
+  "plucked-string": solveString,
+};
+
+/** Collocation would need an implicit stepper here, and its undershoots make the equation ill-posed. */
+const frontSolvers: Record<string, ProblemSolver<BoundedScheme>> = {
+  "porous-medium-2": porousMediumSolver(2),
+  "porous-medium-3": porousMediumSolver(3),
 };
 
 /** What a solver does with the problems of one table. */
@@ -102,7 +118,7 @@ function onPeriodicGrids(
 
 function centralSolver(order: 2 | 4 | 6): ReferenceSolver {
   const periodic = onPeriodicGrids(centralScheme(order), thirdDerivativeSolvers, singleModeSolvers);
-  const bounded = capability(boundedSolvers, secondOrderScheme, "uniform");
+  const bounded = capability({ ...boundedSolvers, ...frontSolvers }, secondOrderScheme, "uniform");
   const closures =
     "Fluxes of a variable diffusivity are taken at half points; ghost points close ends with a derivative condition.";
   return {
@@ -154,6 +170,20 @@ const chebyshevSolver: ReferenceSolver = {
   reconstruction: { kind: "polynomial" },
 };
 
+const harmonicSolver: ReferenceSolver = {
+  ...solving("house-fd2-harmonic", [
+    capability({ "diffusivity-jump": solveLayeredDiffusionHarmonic }, secondOrderScheme, "uniform"),
+  ]),
+  name: "Central differences, harmonic mean",
+  family: "finiteDifference",
+  method: "Fluxes at half points, harmonic mean of the diffusivity over each cell",
+  formalOrder: 2,
+  claim: { kind: "algebraic", order: 2 },
+  description:
+    "Second-order balance of fluxes between neighbouring nodes; the diffusivity of each cell is its exact harmonic mean, so that a jump inside a cell keeps the order.",
+  reconstruction: { kind: "piecewise-polynomial", degree: 1 },
+};
+
 /** The house's own solvers. */
 export const referenceSolvers: ReferenceSolver[] = [
   centralSolver(2),
@@ -163,6 +193,7 @@ export const referenceSolvers: ReferenceSolver[] = [
   compactSolver(6),
   fourierSolver,
   chebyshevSolver,
+  harmonicSolver,
 ];
 
 /**

@@ -4,6 +4,13 @@ const doubling = [16, 32, 64, 128, 256, 512];
 /** Nodes per axis of the grids on which each solver's study is informative; by problem, else under "*". */
 const sequences: Record<string, Record<string, number[]>> = {
   "house-fd2": {
+    "advection-square-wave": [64, 128, 256, 512, 1024],
+    "advection-hat": [64, 128, 256, 512, 1024],
+    "diffusivity-jump": [17, 33, 65, 129, 257, 513],
+    "plucked-string": [33, 65, 129, 257, 513],
+    "porous-medium-2": [31, 61, 121, 241, 481],
+    "porous-medium-3": [31, 61, 121, 241, 481],
+
     "*": doubling,
     "advection-variable-speed": [128, 192, 256, 384, 512, 768],
     "kdv-soliton": [64, 96, 128, 192, 256],
@@ -23,6 +30,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "heat-incompatible-data": [9, 17, 33, 65, 129, 257],
   },
   "house-fd4": {
+    "advection-square-wave": [64, 128, 256, 512, 1024],
+    "advection-hat": [64, 128, 256, 512, 1024],
+
     "*": doubling,
     "advection-variable-speed": [128, 192, 256, 384, 512, 768],
     "kdv-soliton": [64, 96, 128, 192, 256],
@@ -35,6 +45,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "nonlinear-diffusivity": [16, 32, 64, 128, 256],
   },
   "house-fd6": {
+    "advection-square-wave": [64, 128, 256, 512, 1024],
+    "advection-hat": [64, 128, 256, 512, 1024],
+
     "*": [16, 32, 64, 128, 256],
     "advection-variable-speed": [128, 160, 192, 256, 384],
     "kdv-soliton": [96, 128, 160, 192, 256],
@@ -46,6 +59,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "helmholtz-periodic-2d": [16, 24, 32, 48, 64, 96, 128],
   },
   "house-compact4": {
+    "advection-square-wave": [64, 128, 256, 512, 1024],
+    "advection-hat": [64, 128, 256, 512, 1024],
+
     "*": [16, 32, 64, 128, 256],
     "advection-variable-speed": [128, 160, 192, 256, 384],
     "schrodinger-bright-soliton": [128, 160, 192, 256, 384],
@@ -57,6 +73,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "nonlinear-diffusivity": [16, 24, 32, 48, 64, 96, 128],
   },
   "house-compact6": {
+    "advection-square-wave": [64, 128, 256, 512, 1024],
+    "advection-hat": [64, 128, 256, 512, 1024],
+
     "*": [16, 24, 32, 48, 64, 96, 128],
     "advection-variable-speed": [128, 160, 192, 256, 384],
     "schrodinger-bright-soliton": [128, 160, 192, 256, 384],
@@ -67,6 +86,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "nonlinear-diffusivity": [16, 24, 32, 48, 64, 96],
   },
   "house-fourier": {
+    "advection-square-wave": [64, 128, 256, 512, 768],
+    "advection-hat": [64, 128, 256, 512, 768],
+
     "*": [8, 10, 12, 14, 16, 18, 20, 22, 24, 28, 32],
     "advection-variable-speed": [96, 112, 128, 144, 160, 176, 192, 208],
     "kdv-soliton": [64, 80, 96, 112, 128, 144, 160],
@@ -83,6 +105,9 @@ const sequences: Record<string, Record<string, number[]>> = {
     "boundary-layer": [17, 33, 65, 129, 257, 513, 1025],
   },
   "house-cheb": {
+    "diffusivity-jump": [17, 25, 33, 49, 65, 97],
+    "plucked-string": [17, 25, 33, 49, 65],
+
     // Every other number: odd and even ones converge apart on solutions with a symmetry.
     "heat-dirichlet": [5, 7, 9, 11, 13, 15, 17, 21],
     "heat-neumann-robin": [6, 8, 10, 12, 14, 16, 18, 20],
@@ -92,6 +117,7 @@ const sequences: Record<string, Record<string, number[]>> = {
     "bistable-front": [13, 17, 21, 25, 29, 33, 37, 41, 45, 49, 57],
     "heat-incompatible-data": [9, 11, 13, 15, 17, 19, 21, 23, 25, 29],
   },
+  "house-fd2-harmonic": { "*": [17, 33, 65, 129, 257, 513] },
 };
 
 const planar = new Set(["helmholtz-periodic-2d", "poisson-mixed-2d", "vorticity-convected-vortex"]);

@@ -49,7 +49,7 @@ describe.each(problems)("%s", (_, problem) => {
     const { classification, axes, outputTimes, boundaryConditions } = problem;
     const isBounded = axes.some(({ kind }) => kind === "bounded");
     expect(classification.domain).toBe(isBounded ? "bounded" : "periodic");
-    expect(problem.code.startsWith(isBounded ? "B-" : "P-")).toBe(true);
+    expect(problem.code).toMatch(isBounded ? /^[BR]-\d\d$/ : /^P-\d\d$/);
     expect(classification.dimension).toBe(axes.length);
     expect(classification.isSteady).toBe(outputTimes.length === 0);
     expect(problem.grids.kinds).toHaveLength(axes.length);

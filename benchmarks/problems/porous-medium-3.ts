@@ -1,0 +1,71 @@
+import { boundedKinds } from "./allowed-grids";
+import type { ProblemDefinition } from "./definition";
+
+/** B-13: porous medium equation with exponent 3, a spreading Barenblatt profile. */
+export const porousMedium3: ProblemDefinition = {
+  slug: "porous-medium-3",
+  code: "B-13",
+  title: "Porous medium equation, exponent 3",
+  statement:
+    "Diffusion that vanishes with the solution: gas in a porous medium spreads with a sharp front that moves at finite speed. At the front the solution begins like a square root, with unbounded slope. The mass is kept. The front crosses cells as it moves, so errors fall irregularly, and the initial time is not zero.",
+  keywords: ["porous medium", "degenerate diffusion", "free boundary", "limited smoothness"],
+  classification: {
+    domain: "bounded",
+    dimension: 1,
+    isSteady: false,
+    isLinear: false,
+    smoothness: { kind: "finite", continuousDerivatives: 0 },
+  },
+  axes: [{ name: "x", a: -6, b: 6, kind: "bounded" }],
+  fields: [{ name: "u", values: "real", isScored: true }],
+  parameters: [
+    { name: "k", value: 0.25, unit: "dimensionless", meaning: "exponent of the front, 1/(m + 1)" },
+  ],
+  expressions: [
+    {
+      name: "q",
+      expression: "1 - k*2/6*x^2*t^(-2*k)",
+      meaning: "one less the square of the distance over the front's",
+    },
+  ],
+  equations: [{ field: "u", identity: "u_t = d(d(u^3, x), x)" }],
+  initialTime: 1,
+  initialConditions: [{ field: "u", timeDerivative: 0, expression: "sqrt(max(0, 1 - k/3*x^2))" }],
+  boundaryConditions: [
+    { field: "u", axis: "x", end: "a", kind: "dirichlet", alpha: "1", beta: "0", g: "0" },
+    { field: "u", axis: "x", end: "b", kind: "dirichlet", alpha: "1", beta: "0", g: "0" },
+  ],
+  kinks: ["sqrt(12)*t^(1/4)", "-sqrt(12)*t^(1/4)"],
+  outputTimes: [2],
+  exact: { kind: "expression", fields: { u: "q > 0 ? t^(-k)*sqrt(q) : 0" } },
+  grids: {
+    kinds: [boundedKinds],
+    suggested: {
+      uniform: [61, 121, 241, 481],
+      "cell-centred": [60, 120, 240, 480],
+      "chebyshev-lobatto": [33, 49, 65, 97],
+      "legendre-lobatto": [33, 49, 65, 97],
+    },
+  },
+  functional: null,
+  ranksOnAbsoluteNorms: false,
+  checkValues: [
+    { field: "u", at: { x: 0, t: 2 }, value: 0.8408964152537145 },
+    { field: "u", at: { x: 2, t: 2 }, value: 0.7351463218434007 },
+    { field: "u", at: { x: 4, t: 2 }, value: 0.20109727626171583 },
+  ],
+  notes: ["The initial time is 1.", "The support stays clear of both ends."],
+  sources: [
+    {
+      citation:
+        "G. I. Barenblatt, On some unsteady motions of a liquid and gas in a porous medium, Prikl. Mat. Mekh. 16 (1952) 67-78",
+      isFromMemory: true,
+    },
+    {
+      citation:
+        "R. E. Pattle, Diffusion from an instantaneous point source with a concentration-dependent coefficient, Quart. J. Mech. Appl. Math. 12 (1959) 407-409",
+      isFromMemory: true,
+    },
+    { citation: "J. L. Vazquez, The Porous Medium Equation, Oxford, 2007", isFromMemory: true },
+  ],
+};
