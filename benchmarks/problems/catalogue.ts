@@ -10,6 +10,7 @@ import { diffusivityJump } from "./diffusivity-jump";
 import { pluckedString } from "./plucked-string";
 import { porousMedium2 } from "./porous-medium-2";
 import { porousMedium3 } from "./porous-medium-3";
+import { airyOscillatory } from "./airy-oscillatory";
 import { boundaryLayer } from "./boundary-layer";
 import { burgersPeriodic } from "./burgers-periodic";
 import type { ProblemDefinition } from "./definition";
@@ -42,6 +43,7 @@ export const shippedProblems: ProblemDefinition[] = [
   heatDirichlet,
   heatNeumannRobin,
   boundaryLayer,
+  airyOscillatory,
   poissonMixed2d,
   fisherFront,
   bistableFront,

@@ -21,6 +21,7 @@ export interface ConsistencyProof {
 const interiorPoints = 512;
 const boundaryPoints = 128;
 const equationLimit = 1e-10;
+const builtInLimit = 1e-8;
 const initialLimit = 1e-12;
 const boundaryLimit = 1e-10;
 
@@ -96,7 +97,7 @@ function checkEquation(problem: ProblemDefinition, identity: string): ProofCheck
       place,
     );
   }
-  return meter.toCheck("equation", identity, equationLimit);
+  return meter.toCheck("equation", identity, problem.exact.kind === "builtIn" ? builtInLimit : equationLimit);
 }
 
 /** Across a kink the equation holds in its weak form. */

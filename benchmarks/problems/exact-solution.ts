@@ -1,5 +1,6 @@
 import { type CompiledExpression, compileExpression } from "../expressions/compile-expression";
 import { evaluateOnGrid, type GridValues } from "../expressions/evaluate-on-grid";
+import { builtIn } from "./built-ins";
 import type { ProblemDefinition } from "./definition";
 import { contextOf, parameterValues } from "./problem-context";
 
@@ -30,6 +31,7 @@ export function evaluateExact(
     throw new RangeError(`${problem.slug} depends on time; a time was expected, null was given`);
   }
   const point = { coordinates, t, parameters: parameterValues(problem) };
+  if (problem.exact.kind === "builtIn") return builtIn(problem.exact.name).evaluate(field, point, out);
   return evaluateOnGrid(compileExact(problem, field), point, out);
 }
 

@@ -1,5 +1,6 @@
 import { evaluateTaylor, type TaylorValue } from "../expressions/evaluate-taylor";
 import type { Series, TaylorSpace } from "../expressions/taylor-space";
+import { builtIn } from "./built-ins";
 import type { ProblemDefinition } from "./definition";
 import { compileExact } from "./exact-solution";
 import { readDerivativeName } from "./identity-terms";
@@ -24,9 +25,12 @@ export function exactTaylor(
   place: Place,
 ): Map<string, TaylorValue> {
   const valueOf = placeSeries(problem, space, place);
-  return new Map(
-    problem.fields.map(({ name }) => [name, evaluateTaylor(compileExact(problem, name), space, valueOf)[0]]),
-  );
+  const { exact } = problem;
+  const taylorOf = (field: string) =>
+    exact.kind === "builtIn"
+      ? builtIn(exact.name).taylor(field, space, valueOf)
+      : evaluateTaylor(compileExact(problem, field), space, valueOf)[0];
+  return new Map(problem.fields.map(({ name }) => [name, taylorOf(name)]));
 }
 
 /** Axes and t as variables of the space about a place; parameters as constants. */

@@ -1,5 +1,6 @@
 import { parseInContext } from "../expressions/compile-expression";
 import { typesetExpression, typesetName, typesetNumber } from "../expressions/typeset-expression";
+import { builtIn } from "./built-ins";
 import type { Axis, BoundaryCondition, InitialCondition, ProblemDefinition } from "./definition";
 import { equationContext, parseIdentity } from "./identity-terms";
 
@@ -96,7 +97,10 @@ function term(problem: ProblemDefinition, coefficient: string, factor: string): 
 
 function typesetExact(problem: ProblemDefinition): string[] {
   const { exact } = problem;
-  if (exact.kind !== "expression") return [];
+  if (exact.kind === "builtIn") {
+    const { latex } = builtIn(exact.name);
+    return Object.entries(latex).map(([field, text]) => `${applied(problem, field, {})} = ${text}`);
+  }
   return Object.entries(exact.fields).map(
     ([field, text]) => `${applied(problem, field, {})} = ${latexOf(problem, text)}`,
   );

@@ -3,6 +3,7 @@ import type { ProblemDefinition } from "../problems/definition";
 import { type BoundedScheme, chebyshevScheme, secondOrderScheme } from "./bounded-scheme";
 import { centralScheme, compactScheme, fourierScheme, type PeriodicScheme } from "./periodic-scheme";
 import type { ProblemSolver, ReferenceSolver, SolvedRun } from "./reference-solver";
+import { solveAiry } from "./solve-airy";
 import { solveKortewegDeVries, solveSchroedinger } from "./solve-dispersive";
 import {
   porousMediumSolver,
@@ -51,6 +52,7 @@ const boundedSolvers: Record<string, ProblemSolver<BoundedScheme>> = {
   "bistable-front": solveBistable,
   "heat-incompatible-data": solveHeat,
   "diffusivity-jump": solveLayeredDiffusion,
+  "airy-oscillatory": solveAiry,
   "plucked-string": solveString,
 };
 

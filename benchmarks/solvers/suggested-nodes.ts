@@ -4,6 +4,7 @@ const doubling = [16, 32, 64, 128, 256, 512];
 /** Nodes per axis of the grids on which each solver's study is informative; by problem, else under "*". */
 const sequences: Record<string, Record<string, number[]>> = {
   "house-fd2": {
+    "airy-oscillatory": [65, 97, 129, 193, 257, 385, 513],
     "advection-square-wave": [64, 128, 256, 512, 1024],
     "advection-hat": [64, 128, 256, 512, 1024],
     "diffusivity-jump": [17, 33, 65, 129, 257, 513],
@@ -105,6 +106,7 @@ const sequences: Record<string, Record<string, number[]>> = {
     "boundary-layer": [17, 33, 65, 129, 257, 513, 1025],
   },
   "house-cheb": {
+    "airy-oscillatory": [21, 25, 27, 29, 31, 33, 35, 37, 39, 41, 43, 45, 49],
     "diffusivity-jump": [17, 25, 33, 49, 65, 97],
     "plucked-string": [17, 25, 33, 49, 65],
 

@@ -423,6 +423,23 @@ const tables: { problem: string; solver: string; rows: Row[] }[] = [
     ],
   },
   {
+    problem: "airy-oscillatory",
+    solver: "house-fd2",
+    rows: [
+      row(64, 0.017746, 0.02668789, 0.07654074, 0.08076),
+      row(256, 0.0012631, 0.001597842, 0.004433636, 0.004835),
+      row(512, 0.00031951, 0.0004003693, 0.001105754, 0.001211),
+    ],
+  },
+  {
+    problem: "airy-oscillatory",
+    solver: "house-cheb",
+    rows: [
+      row(32, 2.2669e-7, 2.170583e-7, 3.309422e-7, 6.568e-7),
+      row(40, 9.3549e-11, 7.965731e-11, 1.373075e-10, 2.41e-10),
+    ],
+  },
+  {
     problem: "poisson-mixed-2d",
     solver: "house-fd2",
     rows: [
