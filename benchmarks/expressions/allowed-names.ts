@@ -29,7 +29,12 @@ export const functionArity: ReadonlyMap<string, readonly [number, number]> = new
 /** Constants by name; i only where the fields are complex. */
 export const constantNames: ReadonlySet<string> = new Set(["pi", "e", "i"]);
 
-/** Names that no variable, parameter or named expression may take. */
+/**
+ * True of names that no variable, parameter or named expression may take.
+ *
+ * @example isReservedName("sin") // true
+ * @see functionArity
+ */
 export function isReservedName(name: string): boolean {
   return name === "d" || functionArity.has(name) || constantNames.has(name);
 }

@@ -37,7 +37,12 @@ export function planEvaluation(compiled: CompiledExpression, output: number): Ev
   return plan;
 }
 
-/** Indices of the steps that a step reads. */
+/**
+ * Indices of the steps that a step reads.
+ *
+ * @example operandsOf({ name: "sin", a: 3, axes: 1 }) // [3]
+ * @see planEvaluation
+ */
 export function operandsOf(operation: Operation): number[] {
   const { name } = operation;
   if (name === "select") return [operation.test, operation.then, operation.otherwise];

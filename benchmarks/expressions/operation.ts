@@ -50,7 +50,12 @@ export type Operation = { axes: number } & (
   | { name: "derivative"; a: number; along: string }
 );
 
-/** a modulo b with the sign of b, as the floor of the quotient defines it. */
+/**
+ * a modulo b with the sign of b, as the floor of the quotient defines it.
+ *
+ * @example modulo(-0.25, 1) // 0.75
+ * @see D. E. Knuth, The Art of Computer Programming, volume 1, section 1.2.4 (from memory)
+ */
 export function modulo(a: number, b: number): number {
   return a - b * Math.floor(a / b);
 }
@@ -94,10 +99,18 @@ export const binaryFunctions: Record<BinaryName, (a: number, b: number) => numbe
   unequal: (a, b) => (a === b ? 0 : 1),
 };
 
+/** True of a step with one operand.
+ *
+ * @example isUnary("sin") // true
+ */
 export function isUnary(name: Operation["name"]): name is UnaryName {
   return name in unaryFunctions;
 }
 
+/** True of a step with two operands.
+ *
+ * @example isBinary("add") // true
+ */
 export function isBinary(name: Operation["name"]): name is BinaryName {
   return name in binaryFunctions;
 }

@@ -33,7 +33,14 @@ export function exactTaylor(
   return new Map(problem.fields.map(({ name }) => [name, taylorOf(name)]));
 }
 
-/** Axes and t as variables of the space about a place; parameters as constants. */
+/**
+ * Axes and t as variables of the space about a place; parameters as constants.
+ *
+ * @returns the polynomial of a name
+ * @throws RangeError, when called, for a name without a value
+ * @example placeSeries(problem, space, { x: 1, t: 0 })("x")
+ * @see exactTaylor
+ */
 export function placeSeries(
   problem: ProblemDefinition,
   space: TaylorSpace,
@@ -47,12 +54,24 @@ export function placeSeries(
   };
 }
 
-/** The variables of a problem's Taylor space: its axes, and t unless it is steady. */
+/**
+ * The variables of a problem's Taylor space: its axes, and t unless it is steady.
+ *
+ * @example spaceVariables(problem) // ["x", "t"]
+ * @see TaylorSpace
+ */
 export function spaceVariables(problem: ProblemDefinition): string[] {
   return [...problem.axes.map((axis) => axis.name), ...(problem.classification.isSteady ? [] : ["t"])];
 }
 
-/** A field or one of its derivatives as a polynomial; null for another name. */
+/**
+ * A field or one of its derivatives as a polynomial.
+ *
+ * @param exact from `exactTaylor`
+ * @returns null for a name that is neither
+ * @example fieldSeries("u_xx", exact, space)
+ * @see exactTaylor
+ */
 export function fieldSeries(
   name: string,
   exact: Map<string, TaylorValue>,

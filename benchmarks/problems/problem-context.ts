@@ -1,7 +1,13 @@
 import type { ExpressionContext } from "../expressions/compile-expression";
 import type { ProblemDefinition } from "./definition";
 
-/** Names that the expressions of a problem may use: its axes, t, parameters and named expressions. */
+/**
+ * Names that the expressions of a problem may use: its axes, t, parameters and named expressions.
+ *
+ * @returns a context for `compileExpression`
+ * @example contextOf(problem).axes // ["x"]
+ * @see compileExpression
+ */
 export function contextOf(problem: ProblemDefinition): ExpressionContext {
   const named = Object.fromEntries(problem.expressions.map(({ name, expression }) => [name, expression]));
   return {
@@ -15,7 +21,12 @@ export function contextOf(problem: ProblemDefinition): ExpressionContext {
   };
 }
 
-/** Values of a problem's parameters by name. */
+/**
+ * Values of a problem's parameters by name.
+ *
+ * @example parameterValues(problem).nu
+ * @see ProblemDefinition.parameters
+ */
 export function parameterValues(problem: ProblemDefinition): Record<string, number> {
   return Object.fromEntries(problem.parameters.map(({ name, value }) => [name, value]));
 }

@@ -114,7 +114,13 @@ export function finalTime(problem: ProblemDefinition): number {
   return Math.max(...problem.outputTimes);
 }
 
-/** Nodes and spacing of a uniform periodic axis. */
+/**
+ * The length of an axis.
+ *
+ * @param axis index of the axis
+ * @example axisLength(problem, 0) // 2 pi
+ * @see ProblemDefinition.axes
+ */
 export function axisLength({ axes }: ProblemDefinition, axis: number): number {
   return axes[axis].b - axes[axis].a;
 }
