@@ -9,6 +9,9 @@ import { sanitiseFileName } from "./upload-names";
 /** Takes one file's bytes as they arrive: consumes the stream to its end, or rejects. */
 export type FileSink<T> = (name: string, stream: Readable) => Promise<T>;
 
+/** Makes the `submission` part from the other fields of a form that was sent without a script. */
+export type PartFromFields = (fields: [name: string, value: string][], fileNames: string[]) => unknown;
+
 export interface ReceivedFile<T> {
   name: string;
   sha256: string;
@@ -28,12 +31,17 @@ export interface Multipart<T> {
  * before, between or after them. When it throws, every sink has ended. After a refusal the rest of the body is read and
  * thrown away, up to twice the limit, so that a client that is still sending gets to read the answer.
  */
-export async function readMultipart<T>(request: Request, limits: UploadLimits, sink: FileSink<T>) {
+export async function readMultipart<T>(
+  request: Request,
+  limits: UploadLimits,
+  sink: FileSink<T>,
+  fromFields?: PartFromFields,
+) {
   const contentType = request.headers.get("content-type") ?? "";
   if (!/^multipart\/form-data\s*;.*boundary=/i.test(contentType) || !request.body) {
     throw invalid("The body must be multipart/form-data with a part named submission and parts named files.");
   }
-  return await new MultipartReader(limits, sink).read(request, contentType);
+  return await new MultipartReader(limits, sink, fromFields).read(request, contentType);
 }
 
 class MultipartReader<T> {
@@ -41,6 +49,8 @@ class MultipartReader<T> {
   private declareFailed: () => void = () => undefined;
   private readonly failed = new Promise<void>((resolve) => (this.declareFailed = resolve));
   private submissionText: string | null = null;
+  private readonly fields: [name: string, value: string][] = [];
+  private fieldBytes = 0;
   private totalBytes = 0;
   private readonly names = new Set<string>();
   private readonly openMeters = new Set<Transform>();
@@ -49,6 +59,7 @@ class MultipartReader<T> {
   constructor(
     private readonly limits: UploadLimits,
     private readonly sink: FileSink<T>,
+    private readonly fromFields?: PartFromFields,
   ) {}
 
   async read(request: Request, contentType: string): Promise<Multipart<T>> {
@@ -61,9 +72,10 @@ class MultipartReader<T> {
     await this.pump(source, this.createParser(contentType));
     request.signal.removeEventListener("abort", abort);
     const files = await Promise.all(this.received);
-    const submission = this.parseSubmission();
+    const kept = files.filter((file) => file !== null);
+    const submission = this.parseSubmission(kept.map((file) => file.name));
     if (this.failure !== null) throw this.failure;
-    return { submission, files: files.filter((file) => file !== null) };
+    return { submission, files: kept };
   }
 
   /** Never rejects: what goes wrong is kept as the failure, the first one only. */
@@ -105,6 +117,7 @@ class MultipartReader<T> {
     parser.on("partsLimit", () => this.fail(invalid("The body has more than 200 parts.")));
     parser.on("field", (name, value) => {
       if (name === "submission") this.keepSubmission(value);
+      else this.keepField(name, value);
     });
     parser.on("file", (part, stream, info) => {
       if (part === "submission") this.collectSubmission(stream);
@@ -215,12 +228,19 @@ class MultipartReader<T> {
     else this.submissionText = text;
   }
 
+  private keepField(name: string, value: string): void {
+    this.fieldBytes += Buffer.byteLength(name) + Buffer.byteLength(value);
+    if (this.fieldBytes > this.limits.fieldBytes) this.fail(this.overField());
+    else this.fields.push([name, value]);
+  }
+
   private overField(): AppError {
     return tooLarge(`The submission part is larger than ${mebibytes(this.limits.fieldBytes)}.`);
   }
 
-  private parseSubmission(): unknown {
+  private parseSubmission(fileNames: string[]): unknown {
     if (this.failure !== null) return null;
+    if (this.submissionText === null && this.fromFields) return this.fromFields(this.fields, fileNames);
     if (this.submissionText === null) {
       this.fail(invalid("The part named submission is missing: JSON that describes the runs."));
       return null;

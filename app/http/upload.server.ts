@@ -3,7 +3,7 @@ import type { Readable } from "node:stream";
 import { logger } from "@/app/platform/logger.server";
 import { putStream, remove } from "@/app/platform/storage.server";
 import type { StoredFile } from "../features/submissions/stored-file";
-import { readMultipart } from "./read-multipart.server";
+import { readMultipart, type PartFromFields } from "./read-multipart.server";
 import { createSlots } from "./slots.server";
 import { uploadLimits, type UploadLimits } from "./upload-limits";
 
@@ -14,7 +14,7 @@ const memorySlots = createSlots(2);
 /** Streams the files of a multipart body to storage. When it throws, nothing of them is left there. */
 export async function receiveUpload(
   request: Request,
-  limits: UploadLimits = uploadLimits,
+  { limits = uploadLimits, fromFields }: { limits?: UploadLimits; fromFields?: PartFromFields } = {},
 ): Promise<{ submission: unknown; files: StoredFile[] }> {
   const storageKeys: string[] = [];
   const store = async (_name: string, stream: Readable) => {
@@ -25,7 +25,7 @@ export async function receiveUpload(
   };
   return await storingSlots.use(request.signal, async () => {
     try {
-      const { submission, files } = await readMultipart(request, limits, store);
+      const { submission, files } = await readMultipart(request, limits, store, fromFields);
       return { submission, files: files.map(({ kept, ...file }) => ({ ...file, storageKey: kept })) };
     } catch (error) {
       await removeStored(storageKeys);
