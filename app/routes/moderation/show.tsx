@@ -1,0 +1,37 @@
+import { redirect } from "react-router";
+import { ReviewPage } from "@/app/components/moderation/review-page";
+import { requireRole } from "@/app/features/accounts/viewer-policy";
+import { decisionBody } from "@/app/features/moderation/decision-form";
+import { listSubmission } from "@/app/features/moderation/list-submission.server";
+import { returnSubmission } from "@/app/features/moderation/return-submission.server";
+import { getSubmission } from "@/app/features/submissions/get-submission.server";
+import { answerForm, answerPage } from "@/app/http/answers.server";
+import { viewerContext } from "@/app/http/session.server";
+import type { Route } from "./+types/show";
+
+export const meta: Route.MetaFunction = ({ loaderData }) => [
+  { title: `${loaderData ? `S-${loaderData.submission.number}, review` : "Review"} · Backsight` },
+];
+
+export async function loader({ request, params, context }: Route.LoaderArgs) {
+  return answerPage(request, async () => {
+    const viewer = context.get(viewerContext);
+    requireRole(viewer, "admin");
+    return { submission: await getSubmission(viewer, params.id) };
+  });
+}
+
+/** Both decisions post here, the one that lists to `?list`. */
+export async function action({ request, params, context }: Route.ActionArgs) {
+  const viewer = context.get(viewerContext);
+  const isListing = new URL(request.url).searchParams.has("list");
+  return answerForm(request, decisionBody, async ({ note }) => {
+    const decide = isListing ? listSubmission : returnSubmission;
+    await decide(viewer, { id: params.id, note });
+    return redirect(`/moderation?decided=${params.id}`);
+  });
+}
+
+export default function Review({ loaderData, actionData }: Route.ComponentProps) {
+  return <ReviewPage submission={loaderData.submission} refusal={actionData} />;
+}
