@@ -16,7 +16,7 @@ interface AuditLogPageProps {
 
 export function AuditLogPage({ query, log, actions }: AuditLogPageProps) {
   return (
-    <div className="page">
+    <>
       <div className="flex flex-wrap items-baseline gap-x-6 gap-y-1 pt-8">
         <h1 className="text-34">Audit log</h1>
         <p className="text-ink-2">It is only added to. It holds account ids, never names or addresses.</p>
@@ -30,7 +30,7 @@ export function AuditLogPage({ query, log, actions }: AuditLogPageProps) {
         {query.cursor ? <Link to={addressOf(query, null)}>Newest</Link> : null}
         {log.nextCursor ? <Link to={addressOf(query, log.nextCursor)}>Older</Link> : null}
       </p>
-    </div>
+    </>
   );
 }
 

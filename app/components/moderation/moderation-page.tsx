@@ -26,7 +26,7 @@ interface ModerationPageProps {
 export function ModerationPage({ query, list, now }: ModerationPageProps) {
   const [search] = useSearchParams();
   return (
-    <div className="page">
+    <>
       <div className="flex flex-wrap items-baseline gap-x-6 gap-y-1 pt-8">
         <h1 className="text-34">Review of submissions</h1>
         <p className="text-ink-2">Every decision carries a note; the author reads it.</p>
@@ -46,7 +46,7 @@ export function ModerationPage({ query, list, now }: ModerationPageProps) {
         A submission becomes a record when it is listed. Withdrawing is possible only then, from the record,
         with a note. Nobody decides about a submission of their own team.
       </p>
-    </div>
+    </>
   );
 }
 

@@ -17,40 +17,41 @@ interface QueueLedgerProps {
 }
 
 export function QueueLedger({ tab, items, now }: QueueLedgerProps) {
-  const table = useRef<HTMLTableElement>(null);
+  const table = useRef<HTMLDivElement>(null);
   useQueueKeys(table);
   if (items.length === 0) return <p className="mt-6 text-17">No submission is in this list.</p>;
   return (
-    <Ledger
-      ref={table}
-      caption={tab === "waiting" ? "Submissions waiting, oldest first" : "Submissions, latest first"}
-      isCaptionHidden
-      className="mt-4.5 max-md:block"
-    >
-      <thead className="max-md:hidden">
-        <tr>
-          <th scope="col" className="num w-[84px]">
-            {tab === "waiting" ? "Waiting" : "Handed in"}
-          </th>
-          <th scope="col" className="w-[96px] !pl-3">
-            Submission
-          </th>
-          <th scope="col">Solver and team</th>
-          <th scope="col" className="w-[86px]">
-            Problem
-          </th>
-          <th scope="col">Findings</th>
-          <th scope="col" className="num">
-            Decision
-          </th>
-        </tr>
-      </thead>
-      <tbody className="max-md:block">
-        {items.map((item) => (
-          <QueueRow key={item.id} item={item} tab={tab} now={now} />
-        ))}
-      </tbody>
-    </Ledger>
+    <div ref={table} className="mt-4.5">
+      <Ledger
+        caption={tab === "waiting" ? "Submissions waiting, oldest first" : "Submissions, latest first"}
+        isCaptionHidden
+        className="max-md:block"
+      >
+        <thead className="max-md:hidden">
+          <tr>
+            <th scope="col" className="num w-[84px]">
+              {tab === "waiting" ? "Waiting" : "Handed in"}
+            </th>
+            <th scope="col" className="w-[96px] pl-3">
+              Submission
+            </th>
+            <th scope="col">Solver and team</th>
+            <th scope="col" className="w-[86px]">
+              Problem
+            </th>
+            <th scope="col">Findings</th>
+            <th scope="col" className="num">
+              Decision
+            </th>
+          </tr>
+        </thead>
+        <tbody className="max-md:block">
+          {items.map((item) => (
+            <QueueRow key={item.id} item={item} tab={tab} now={now} />
+          ))}
+        </tbody>
+      </Ledger>
+    </div>
   );
 }
 
@@ -60,12 +61,12 @@ function QueueRow({ item, tab, now }: { item: ModerationItem; tab: ModerationTab
       <td className="num max-md:col-start-2 max-md:row-start-1">
         <time dateTime={item.handedInAt.toISOString()}>{waitingTime(item.handedInAt, now)}</time>
       </td>
-      <td className="!pl-3 font-figure max-md:col-start-1 max-md:row-start-1 max-md:!pl-0">
+      <td className="pl-3 font-figure max-md:col-start-1 max-md:row-start-1 max-md:pl-0">
         <Link to={`/moderation/${item.id}`}>S-{item.number}</Link>
       </td>
       <th scope="row">
         <span className="inline-flex items-center gap-1.5 font-figure text-15 font-medium">
-          <FamilyMark family={item.family} isMarkOnly />
+          <FamilyMark family={item.family} />
           {item.solver.name}
         </span>
         <Small>{item.team.name}</Small>
@@ -74,7 +75,7 @@ function QueueRow({ item, tab, now }: { item: ModerationItem; tab: ModerationTab
       <td className="max-md:col-span-2">
         <Findings item={item} />
       </td>
-      <td className="num !whitespace-normal max-md:col-span-2 max-md:!text-left">
+      <td className="num whitespace-normal max-md:col-span-2 max-md:text-left">
         <Decision item={item} tab={tab} />
       </td>
     </tr>

@@ -1,7 +1,7 @@
 import { type RefObject, useEffect } from "react";
 
 /** Keys of the queue: n and p move the focus from row to row, e opens the evidence of the row that has it. */
-export function useQueueKeys(table: RefObject<HTMLTableElement | null>): void {
+export function useQueueKeys(table: RefObject<HTMLElement | null>): void {
   useEffect(() => {
     const listen = (event: KeyboardEvent) => {
       if (!isPlainKey(event)) return;

@@ -59,7 +59,7 @@ export function CostStep({ bind, errorOf, rows, isSending, onChange }: CostStepP
                           disabled={isSending}
                           placeholder={placeholder}
                           aria-label={`${label} of ${row.name}`}
-                          className="!w-32 !px-2 !py-1 text-right font-figure !text-13"
+                          className="w-32 px-2 py-1 text-right font-figure text-13"
                           onChange={(event) =>
                             onChange({ type: "change", name: row.name, field, value: event.target.value })
                           }

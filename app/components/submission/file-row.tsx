@@ -53,7 +53,7 @@ export function FileRow(props: FileRowProps) {
             disabled={isSending}
             aria-label={`N of ${row.name}`}
             placeholder="N"
-            className="!w-24 !px-2 !py-1 font-figure !text-13"
+            className="w-24 px-2 py-1 font-figure text-13"
           />
         </td>
         <td data-label="Bytes" className={`num ${cell}`}>
@@ -66,7 +66,7 @@ export function FileRow(props: FileRowProps) {
             onChange={change("role")}
             disabled={isSending}
             aria-label={`Role of ${row.name}`}
-            className="!w-auto !py-1 !text-13"
+            className="w-auto py-1 text-13"
           >
             {runRoles.map((role) => (
               <option key={role} value={role}>
@@ -91,7 +91,7 @@ export function FileRow(props: FileRowProps) {
             disabled={isSending}
             aria-label={`Wall time of ${row.name}`}
             placeholder="0.4 ms"
-            className="!w-22 !px-2 !py-1 text-right font-figure !text-13"
+            className="w-22 px-2 py-1 text-right font-figure text-13"
           />
         </td>
         <td className={`num ${cell}`}>

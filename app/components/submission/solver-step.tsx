@@ -1,5 +1,6 @@
-import { FamilyMark } from "@/app/components/ui/family-mark";
+import { FamilyKey } from "@/app/components/ui/family-mark";
 import { Field } from "@/app/components/ui/field";
+import { Radio } from "@/app/components/ui/radio";
 import { Select } from "@/app/components/ui/select";
 import { TextArea } from "@/app/components/ui/text-area";
 import { TextInput } from "@/app/components/ui/text-input";
@@ -107,24 +108,13 @@ function FamilyChoice({ bind, errorOf, family }: FieldBinding & { family: string
   const error = errorOf("family");
   return (
     <fieldset className="mb-4" aria-describedby={error ? "family-error" : undefined}>
-      <legend className="mb-1 text-13 font-semibold">Method family</legend>
+      <legend>Method family</legend>
       <div className="grid gap-x-7 border-y border-hair py-1.5 sm:grid-cols-2 lg:grid-cols-3">
         {methodFamilies.map((kind) => (
-          <label
-            key={kind}
-            className="flex min-h-8 cursor-pointer items-center gap-2 text-14 max-sm:min-h-11"
-          >
-            <input
-              type="radio"
-              name={name}
-              value={kind}
-              checked={family === kind}
-              onChange={onChange}
-              className="size-4 accent-ink"
-            />
+          <Radio key={kind} name={name} value={kind} checked={family === kind} onChange={onChange}>
             {familyNames[kind]}
-            <FamilyMark family={kind} className="ml-auto" />
-          </label>
+            <FamilyKey family={kind} className="ml-auto" />
+          </Radio>
         ))}
       </div>
       {error ? (
