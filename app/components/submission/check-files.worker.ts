@@ -12,7 +12,7 @@ import type {
   FileAnswer,
   StudyAnswer,
 } from "./file-check";
-import { excerptOf } from "./file-excerpt";
+import { excerptOf, excerptOfNotFinite } from "./file-excerpt";
 
 /** Reads and scores files beside the page, so that a large one does not stop the typing. Nothing is sent. */
 
@@ -72,8 +72,11 @@ function refusing<R extends object>(name: string, work: () => R): R | { refusal:
 }
 
 function excerptFrom(bytes: Uint8Array, refusal: Refusal): FileAnswer["excerpt"] {
-  if (!refusal.where?.startsWith("row ")) return null;
-  return excerptOf(new TextDecoder().decode(bytes), refusal.where);
+  const isOfText = refusal.where?.startsWith("row ") ?? false;
+  const isOfTable = refusal.code === "values/not-finite" && /\.[ct]sv$/i.test(refusal.file ?? "");
+  if (!isOfText && !isOfTable) return null;
+  const text = new TextDecoder().decode(bytes);
+  return isOfText ? excerptOf(text, refusal.where) : excerptOfNotFinite(text);
 }
 
 async function checksumOf(bytes: Uint8Array<ArrayBuffer>): Promise<string | null> {

@@ -6,6 +6,8 @@ import type { Finding, RunScore, Study } from "@/benchmarks/scoring/result";
 /** Lines of a text file about the place that a refusal names. */
 export interface Excerpt {
   lines: { number: number; text: string; isNamed: boolean }[];
+  /** "Row 94, column 2". */
+  place: string;
   /** Where the named column begins in its line, and how long it is; null where only a row is named. */
   caret: { from: number; length: number } | null;
 }

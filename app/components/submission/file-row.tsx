@@ -46,14 +46,14 @@ export function FileRow(props: FileRowProps) {
         <th scope="row" className="font-figure break-all max-md:block max-md:border-0">
           {row.name}
         </th>
-        <td data-label="N" className={cell}>
+        <td data-label="N" className={`num ${cell}`}>
           <TextInput
             value={row.n}
             onChange={change("n")}
             disabled={isSending}
             aria-label={`N of ${row.name}`}
             placeholder="N"
-            className="w-24 px-2 py-1 font-figure text-13"
+            className="w-22 px-2 py-1 text-right font-figure text-13"
           />
         </td>
         <td data-label="Bytes" className={`num ${cell}`}>
@@ -114,7 +114,11 @@ export function FileRow(props: FileRowProps) {
                   key={refusal.code + refusal.message}
                   refusal={refusal}
                   excerpt={refusal === read?.refusal ? read.excerpt : null}
-                  remedy="Drop a file of the same name to replace this one; the others are kept."
+                  remedy={
+                    refusal === read?.refusal
+                      ? "Drop a file of the same name to replace this one; the others are kept."
+                      : undefined
+                  }
                 />
               ))}
               {findings.map((finding) => (

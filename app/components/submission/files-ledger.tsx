@@ -26,7 +26,9 @@ export function FilesLedger({ rows, answers, refusals, findings, shares, onChang
       <thead className="max-md:hidden">
         <tr>
           <th scope="col">File</th>
-          <th scope="col">N</th>
+          <th scope="col" className="num">
+            N
+          </th>
           <th scope="col" className="num">
             Bytes
           </th>

@@ -22,7 +22,7 @@ interface GridFieldsProps extends FieldBinding {
 export function GridFields({ bind, errorOf, problem, reconstruction }: GridFieldsProps) {
   const { axes, grids } = problem;
   return (
-    <div className="grid gap-x-7 sm:grid-cols-2 lg:grid-cols-3">
+    <div className="grid gap-x-7 sm:grid-cols-2 lg:grid-cols-4">
       {axes.map((axis, i) => (
         <Field key={axis.name} label={gridLabel(axes, axis)} error={errorOf(gridFieldOf(axis.name))}>
           <Select {...bind(gridFieldOf(axis.name))}>

@@ -23,6 +23,7 @@ export function ProblemStep({
   return (
     <Step
       id="problem"
+      isFirst
       title="Problem"
       remark={chosen ? `revision ${chosen.revision}` : "what the files solve"}
     >

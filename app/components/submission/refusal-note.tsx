@@ -10,11 +10,11 @@ interface RefusalNoteProps {
 
 /** What is wrong with a file: the place, what was found and expected, what to do, and the lines themselves. */
 export function RefusalNote({ refusal, excerpt = null, remedy }: RefusalNoteProps) {
-  const place = placeOf(refusal.where, refusal.message);
+  const place = excerpt?.place ?? placeOf(refusal.where, refusal.message);
   return (
     <div>
       <p className="border-l-3 border-bad pl-3 text-14 text-pretty">
-        {place ? <b className="font-semibold">{place}: </b> : null}
+        {place ? <b>{place}: </b> : null}
         {refusal.message}
         {remedy ? ` ${remedy}` : null}
       </p>

@@ -13,10 +13,12 @@ interface ScoreStepProps {
   answers: ReadonlyMap<string, Checked>;
   study: StudyAnswer | null;
   family: MethodFamily | null;
+  /** The last one; null for a steady problem. */
+  outputTime: number | null;
 }
 
 /** What the scorer makes of the files in this browser; the server's figures are the ones that count. */
-export function ScoreStep({ rows, answers, study, family }: ScoreStepProps) {
+export function ScoreStep({ rows, answers, study, family, outputTime }: ScoreStepProps) {
   const scored = rows.filter((row) => normsOf(answers.get(row.name))).length;
   return (
     <Step
@@ -35,7 +37,11 @@ export function ScoreStep({ rows, answers, study, family }: ScoreStepProps) {
         <p className="text-14 text-ink-2">No file is chosen yet.</p>
       ) : (
         <div className="grid items-start gap-11 xl:grid-cols-[minmax(0,490px)_minmax(0,1fr)]">
-          {study?.study ? <StudyChart studies={[study.study]} family={family ?? "other"} /> : <div />}
+          {study?.study ? (
+            <StudyChart studies={[study.study]} family={family ?? "other"} outputTime={outputTime} />
+          ) : (
+            <div />
+          )}
           <div className="grid gap-3">
             <ScoreLedger rows={rows} answers={answers} study={study} />
             <StudyFindings study={study} />
@@ -46,7 +52,7 @@ export function ScoreStep({ rows, answers, study, family }: ScoreStepProps) {
   );
 }
 
-function ScoreLedger({ rows, answers, study }: Omit<ScoreStepProps, "family">) {
+function ScoreLedger({ rows, answers, study }: Omit<ScoreStepProps, "family" | "outputTime">) {
   return (
     <Ledger caption="Scores so far" isCaptionHidden>
       <thead>
@@ -75,8 +81,12 @@ function ScoreLedger({ rows, answers, study }: Omit<ScoreStepProps, "family">) {
               <th scope="row" className="num">
                 {norms ? formatNodes(norms.n) : row.n}
               </th>
-              <td className="num">{norms ? formatError(norms.relL2) : null}</td>
-              <td className="num">{norms ? formatError(norms.relMax) : null}</td>
+              <td className="num">
+                <ErrorFigure value={norms?.relL2} />
+              </td>
+              <td className="num">
+                <ErrorFigure value={norms?.relMax} />
+              </td>
               <td className="num">{norms && row.role === "study" ? pairOrder(study, norms.n) : null}</td>
               <td>
                 <ScoreState answer={answer} />
@@ -87,6 +97,10 @@ function ScoreLedger({ rows, answers, study }: Omit<ScoreStepProps, "family">) {
       </tbody>
     </Ledger>
   );
+}
+
+function ErrorFigure({ value }: { value: number | null | undefined }) {
+  return value === null || value === undefined ? null : formatError(value, 3);
 }
 
 function normsOf(answer: Checked | undefined) {

@@ -4,18 +4,20 @@ interface StepProps {
   id: string;
   title: string;
   remark?: string;
+  /** No rule divides it from what is above. */
+  isFirst?: boolean;
   /** Stands at the right of the heading. */
   state?: ReactNode;
   children: ReactNode;
 }
 
 /** One step of the form; all steps are on one page. */
-export function Step({ id, title, remark, state, children }: StepProps) {
+export function Step({ id, title, remark, isFirst = false, state, children }: StepProps) {
   return (
     <section
       id={id}
       aria-labelledby={`${id}-heading`}
-      className="scroll-mt-4 border-t border-rule pt-4 pb-8 first-of-type:border-t-0 first-of-type:pt-0"
+      className={`scroll-mt-4 pb-8 ${isFirst ? "" : "border-t border-rule pt-4"}`}
     >
       <header className="mb-3.5 flex flex-wrap items-baseline gap-x-3.5 gap-y-0.5">
         <h2 id={`${id}-heading`} className="text-20">

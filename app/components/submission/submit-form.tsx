@@ -76,7 +76,13 @@ export function SubmitForm({ problem, teams, limits, form }: SubmitFormProps) {
         </div>
       </Step>
       <CostStep bind={bind} errorOf={errorOf} rows={rows} isSending={isSending} onChange={onRows} />
-      <ScoreStep rows={rows} answers={form.answers} study={form.study} family={family} />
+      <ScoreStep
+        rows={rows}
+        answers={form.answers}
+        study={form.study}
+        family={family}
+        outputTime={problem.definition.outputTimes.at(-1) ?? null}
+      />
       <UploadStep
         bind={bind}
         errorOf={errorOf}

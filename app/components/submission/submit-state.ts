@@ -89,9 +89,11 @@ export interface Setting {
 
 /** What can be scored so far; a claim that is not complete yet holds nothing up. */
 export function settingOf(fields: Fields, rows: UploadRow[], problem: ProblemDefinition): Setting {
-  const { claim, ...part } = assemblePart(fields, rows.map(runFieldsOf));
-  const parsed = settingPart.safeParse({ ...part, claim });
-  const usable = parsed.success ? parsed : settingPart.safeParse(part);
+  const part = assemblePart(fields, rows.map(runFieldsOf));
+  const { problem: slug, claim, grid, values, reconstruction, precision } = part;
+  const setting = { problem: slug, grid, values, reconstruction, precision };
+  const parsed = settingPart.safeParse({ ...setting, claim });
+  const usable = parsed.success ? parsed : settingPart.safeParse(setting);
   const declaration = usable.success ? toDeclaration({ ...usable.data, runs: [] }, { kind: "none" }) : null;
   const runs = rows.map((row, i) => runOf(row, (part.runs as unknown[])[i]));
   const checked = runs.filter((run) => run.n.length > 0);

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { excerptOf } from "@/app/components/submission/file-excerpt";
+import { excerptOf, excerptOfNotFinite } from "@/app/components/submission/file-excerpt";
 
 const table = "x,u\n0.00, 1.5\n0.25, nan\n0.50, 2.5\n0.75, 3.5\n";
 
@@ -26,5 +26,13 @@ describe("the lines about a refused place", () => {
 
   it("cut long lines", () => {
     expect(excerptOf("1,".repeat(500), "row 1")?.lines[0].text.length).toBeLessThan(130);
+  });
+});
+
+describe("the lines about a value that is not finite", () => {
+  it("are found by the value, comments left aside", () => {
+    const excerpt = excerptOfNotFinite(`# nan is none\n${table}`);
+    expect(excerpt?.place).toBe("Row 4, column 2");
+    expect(excerptOfNotFinite("x,u\n0,1\n")).toBeNull();
   });
 });
