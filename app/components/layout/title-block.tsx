@@ -38,8 +38,7 @@ export function TitleBlock({ entry, readOn }: TitleBlockProps) {
         <a href="/records">Records</a>
         <span>
           A rank on model problems is evidence about a discretisation, not a validation of a code for a
-          design. Where a result bears on safety, your own verification and validation, and licensed practice,
-          decide.
+          design.
         </span>
       </div>
     </footer>
