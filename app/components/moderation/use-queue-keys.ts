@@ -17,8 +17,20 @@ export function useQueueKeys(table: RefObject<HTMLElement | null>): void {
   }, [table]);
 }
 
+/** Keys of one submission's page: each follows the link that names it. */
+export function useReviewKeys(links: RefObject<HTMLElement | null>): void {
+  useEffect(() => {
+    const listen = (event: KeyboardEvent) => {
+      if (!isPlainKey(event) || !/^[npe]$/.test(event.key)) return;
+      links.current?.querySelector<HTMLAnchorElement>(`a[data-key="${event.key}"]`)?.click();
+    };
+    window.addEventListener("keydown", listen);
+    return () => window.removeEventListener("keydown", listen);
+  }, [links]);
+}
+
 /** A letter typed into a field, or with a modifier, is not a command. */
-export function isPlainKey(event: KeyboardEvent): boolean {
+function isPlainKey(event: KeyboardEvent): boolean {
   if (event.ctrlKey || event.metaKey || event.altKey || event.defaultPrevented) return false;
   return !(
     event.target instanceof HTMLElement && event.target.closest("input, textarea, select, [contenteditable]")

@@ -5,16 +5,11 @@ import { TextInput } from "@/app/components/ui/text-input";
 import { formatBytes } from "@/app/components/ui/figures";
 import type { Refusal } from "@/benchmarks/scoring/data-error";
 import type { Finding } from "@/benchmarks/scoring/result";
-import { runRoles, type RunRole } from "@/drizzle/enums";
+import { runRoles } from "@/drizzle/enums";
 import { RefusalNote } from "./refusal-note";
+import { roleNames } from "./role-names";
 import type { RowsAction, UploadRow } from "./upload-rows";
 import type { Checked } from "./use-file-checks";
-
-export const roleNames: Record<RunRole, string> = {
-  study: "study",
-  timeStep: "time step",
-  iteration: "iteration",
-};
 
 interface FileRowProps {
   row: UploadRow;

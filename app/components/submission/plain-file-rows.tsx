@@ -1,5 +1,5 @@
 import { runRoles } from "@/drizzle/enums";
-import { roleNames } from "./file-row";
+import { roleNames } from "./role-names";
 
 const rows = Array.from({ length: 8 }, (_, row) => row + 1);
 const control = "w-full border border-hair border-b-ink-2 bg-sheet px-2 py-1.5 font-figure text-14";

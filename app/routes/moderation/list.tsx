@@ -1,3 +1,4 @@
+import type { TitleBlockEntry } from "@/app/components/layout/title-block";
 import { ModerationPage } from "@/app/components/moderation/moderation-page";
 import { listModeration } from "@/app/features/moderation/list-moderation.server";
 import { parseModerationQuery } from "@/app/features/moderation/moderation-query";
@@ -6,6 +7,13 @@ import { viewerContext } from "@/app/http/session.server";
 import type { Route } from "./+types/list";
 
 export const meta: Route.MetaFunction = () => [{ title: "Review of submissions · Backsight" }];
+
+export const handle = {
+  titleBlock: ({ list }: Route.ComponentProps["loaderData"]): TitleBlockEntry => ({
+    label: "Waiting",
+    value: `${list.counts.waiting} submission${list.counts.waiting === 1 ? "" : "s"}`,
+  }),
+};
 
 export async function loader({ request, context }: Route.LoaderArgs) {
   return answerPage(request, async () => {

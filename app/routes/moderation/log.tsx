@@ -1,3 +1,4 @@
+import type { TitleBlockEntry } from "@/app/components/layout/title-block";
 import { AuditLogPage } from "@/app/components/moderation/audit-log-page";
 import { parseAuditLogQuery } from "@/app/features/moderation/audit-log-query";
 import { listAuditActions, listAuditLog } from "@/app/features/moderation/list-audit-log.server";
@@ -6,6 +7,10 @@ import { viewerContext } from "@/app/http/session.server";
 import type { Route } from "./+types/log";
 
 export const meta: Route.MetaFunction = () => [{ title: "Audit log · Backsight" }];
+
+export const handle = {
+  titleBlock: (): TitleBlockEntry => ({ label: "Sheet", value: "Audit log" }),
+};
 
 export async function loader({ request, context }: Route.LoaderArgs) {
   return answerPage(request, async () => {

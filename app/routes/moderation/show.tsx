@@ -1,7 +1,10 @@
 import { redirect } from "react-router";
+import type { TitleBlockEntry } from "@/app/components/layout/title-block";
 import { ReviewPage } from "@/app/components/moderation/review-page";
+import { drawStudy } from "@/app/components/submission/draw-study.server";
 import { requireRole } from "@/app/features/accounts/viewer-policy";
 import { decisionBody } from "@/app/features/moderation/decision-form";
+import { listQueue } from "@/app/features/moderation/list-queue.server";
 import { listSubmission } from "@/app/features/moderation/list-submission.server";
 import { returnSubmission } from "@/app/features/moderation/return-submission.server";
 import { getSubmission } from "@/app/features/submissions/get-submission.server";
@@ -13,12 +16,26 @@ export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData ? `S-${loaderData.submission.number}, review` : "Review"} · Backsight` },
 ];
 
+export const handle = {
+  titleBlock: ({ submission }: Route.ComponentProps["loaderData"]): TitleBlockEntry => ({
+    label: "In review",
+    value: `S-${submission.number}`,
+  }),
+};
+
 export async function loader({ request, params, context }: Route.LoaderArgs) {
   return answerPage(request, async () => {
     const viewer = context.get(viewerContext);
     requireRole(viewer, "admin");
-    return { submission: await getSubmission(viewer, params.id) };
+    const [submission, queue] = await Promise.all([getSubmission(viewer, params.id), listQueue(viewer)]);
+    return { submission, drawings: await drawStudy(submission), neighbours: neighboursOf(queue, params.id) };
   });
+}
+
+/** The submissions before and after this one in the queue. */
+function neighboursOf(queue: { id: string }[], id: string) {
+  const at = queue.findIndex((item) => item.id === id);
+  return { previous: queue[at - 1]?.id ?? null, next: queue[at + 1]?.id ?? null };
 }
 
 /** Both decisions post here, the one that lists to `?list`. */
@@ -33,5 +50,5 @@ export async function action({ request, params, context }: Route.ActionArgs) {
 }
 
 export default function Review({ loaderData, actionData }: Route.ComponentProps) {
-  return <ReviewPage submission={loaderData.submission} refusal={actionData} />;
+  return <ReviewPage {...loaderData} refusal={actionData} />;
 }

@@ -1,3 +1,4 @@
+import type { TitleBlockEntry } from "@/app/components/layout/title-block";
 import { SubmissionsLedger } from "@/app/components/submission/submissions-ledger";
 import { requireAccount } from "@/app/features/accounts/viewer-policy";
 import { listMySubmissions } from "@/app/features/submissions/list-submissions.server";
@@ -6,6 +7,10 @@ import { viewerContext } from "@/app/http/session.server";
 import type { Route } from "./+types/list";
 
 export const meta: Route.MetaFunction = () => [{ title: "Submissions · Backsight" }];
+
+export const handle = {
+  titleBlock: (): TitleBlockEntry => ({ label: "Sheet", value: "Submissions of your teams" }),
+};
 
 export async function loader({ request, context }: Route.LoaderArgs) {
   return answerPage(request, async () => {

@@ -1,4 +1,5 @@
 import { data, redirect } from "react-router";
+import type { TitleBlockEntry } from "@/app/components/layout/title-block";
 import { SubmitPage } from "@/app/components/submission/submit-page";
 import { requireAccount } from "@/app/features/accounts/viewer-policy";
 import { getProblem } from "@/app/features/problems/get-problem.server";
@@ -13,6 +14,13 @@ import { AppError, type AppErrorKind } from "@/app/platform/errors";
 import type { Route } from "./+types/new";
 
 export const meta: Route.MetaFunction = () => [{ title: "Hand in a refinement study · Backsight" }];
+
+export const handle = {
+  titleBlock: ({ problem }: Route.ComponentProps["loaderData"]): TitleBlockEntry => ({
+    label: "Sheet",
+    value: problem ? `Submission, ${problem.definition.code}` : "Submission",
+  }),
+};
 
 export async function loader({ request, context }: Route.LoaderArgs) {
   return answerPage(request, async () => {

@@ -1,5 +1,7 @@
 import { redirect } from "react-router";
 import { z } from "zod";
+import type { TitleBlockEntry } from "@/app/components/layout/title-block";
+import { drawStudy } from "@/app/components/submission/draw-study.server";
 import { SubmissionPage } from "@/app/components/submission/submission-page";
 import { WithdrawPage } from "@/app/components/submission/withdraw-page";
 import { decisionBody } from "@/app/features/moderation/decision-form";
@@ -15,6 +17,13 @@ export const meta: Route.MetaFunction = ({ loaderData }) => {
   return [{ title: view ? `S-${view.number}, ${view.solver.name} · Backsight` : "Submission · Backsight" }];
 };
 
+export const handle = {
+  titleBlock: ({ submission }: Route.ComponentProps["loaderData"]): TitleBlockEntry => ({
+    label: "Submission",
+    value: `S-${submission.number}, not listed`,
+  }),
+};
+
 /** What is listed has its permanent address; only its withdrawal is asked for here. */
 export async function loader({ request, params, context }: Route.LoaderArgs) {
   return answerPage(request, async () => {
@@ -23,7 +32,7 @@ export async function loader({ request, params, context }: Route.LoaderArgs) {
     if (submission.record && !isWithdrawing) {
       throw redirect(`/records/${submission.record.number}/${submission.record.version}`);
     }
-    return { submission, isWithdrawing };
+    return { submission, isWithdrawing, drawings: await drawStudy(submission) };
   });
 }
 
@@ -47,7 +56,7 @@ function isAskedToWithdraw(request: Request): boolean {
 }
 
 export default function Submission({ loaderData, actionData }: Route.ComponentProps) {
-  const { submission, isWithdrawing } = loaderData;
+  const { submission, isWithdrawing, drawings } = loaderData;
   if (isWithdrawing) return <WithdrawPage submission={submission} refusal={actionData} />;
-  return <SubmissionPage submission={submission} refusal={actionData} />;
+  return <SubmissionPage submission={submission} drawings={drawings} refusal={actionData} />;
 }

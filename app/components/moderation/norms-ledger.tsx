@@ -1,0 +1,56 @@
+import { formatError, formatNodes } from "@/app/components/ui/figures";
+import { Ledger } from "@/app/components/ui/ledger";
+import type { Claim } from "@/benchmarks/scoring/declaration";
+import type { RelativeNormName, Study } from "@/benchmarks/scoring/result";
+
+const normNames: Record<RelativeNormName, string> = { relL1: "L1", relL2: "L2", relMax: "max" };
+const shownGrids = 3;
+
+/** The finest grids in all norms, with the order of the last pair beside the formal one. */
+export function NormsLedger({ studies, claim }: { studies: Study[]; claim: Claim }) {
+  const finest = studies[0]?.points.slice(-shownGrids) ?? [];
+  return (
+    <Ledger caption="Errors and orders" isCaptionHidden>
+      <thead>
+        <tr>
+          <th scope="col">Norm</th>
+          {finest.map((point) => (
+            <th key={point.n.join()} scope="col" className="num">
+              N = {formatNodes(point.n)}
+            </th>
+          ))}
+          <th scope="col" className="num">
+            Order of
+            <br />
+            finest pair
+          </th>
+          <th scope="col" className="num">
+            Formal
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {studies.map((study) => (
+          <tr key={study.norm + study.measure}>
+            <th scope="row">
+              {normNames[study.norm]}
+              {study.measure === "between" ? ", between" : ""}
+            </th>
+            {study.points.slice(-shownGrids).map((point) => (
+              <td key={point.n.join()} className="num">
+                {formatError(point.error, 3)}
+              </td>
+            ))}
+            <td className="num">{orderOf(study)}</td>
+            <td className="num">{claim.kind === "algebraic" ? claim.order : ""}</td>
+          </tr>
+        ))}
+      </tbody>
+    </Ledger>
+  );
+}
+
+function orderOf(study: Study): string {
+  const last = study.pairOrders.at(-1);
+  return last === undefined || !Number.isFinite(last) ? "" : last.toFixed(2);
+}

@@ -1,0 +1,12 @@
+import type { ReactNode } from "react";
+
+export function Section({ id, title, children }: { id: string; title: string; children: ReactNode }) {
+  return (
+    <section aria-labelledby={id} className="min-w-0 pt-10">
+      <h2 id={id} className="mb-3">
+        {title}
+      </h2>
+      {children}
+    </section>
+  );
+}
