@@ -92,7 +92,8 @@ describe("who may call what", () => {
     expect([...new Set(matrix.map((row) => row.call))].sort()).toEqual(await listRouteCalls());
   });
 
-  it.each(matrix)("$call: $method $path", async ({ method, path, expected }) => {
+  it.each(matrix.map((row) => [`${row.call}, ${row.path}`, row] as const))("%s", async (_title, row) => {
+    const { method, path, expected } = row;
     const found: string[] = [];
     for (const viewer of viewers) found.push(`${viewer} ${await statusOf(viewer, method, path)}`);
     expect(found).toEqual(viewers.map((viewer) => `${viewer} ${expected[viewer]}`));

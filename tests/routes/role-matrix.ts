@@ -1,5 +1,3 @@
-import type { ApiScope } from "@/drizzle/enums";
-
 /**
  * Who gets which status. People come with a session on pages and on reads of the API, and with a token that has all
  * scopes of their role on its writes; the last four are tokens with one scope, of an author (read, submit), a
@@ -56,7 +54,6 @@ const publicRead = (call: string, request: string, status = 200) =>
   row(call, request, [status, status, status, status, status, status, 403, 403, 403]);
 
 export const matrix: MatrixRow[] = [
-  everyone("routes/layout.tsx loader", "GET /", 200),
   everyone("routes/home.tsx loader", "GET /", 200),
   everyone("routes/problems/list.tsx loader", "GET /problems", 200),
   everyone("routes/problems/show.tsx loader", "GET /problems/advection-exp-sine", 200),
@@ -65,20 +62,21 @@ export const matrix: MatrixRow[] = [
   everyone("routes/not-found.tsx loader", "GET /nothing-here", 404),
 
   page("routes/accounts/sign-in.tsx loader", "GET /sign-in", [200, 302, 302, 302, 302]),
-  everyone("routes/accounts/sign-in.tsx action", "POST /sign-in", 422),
+  // Those who are signed in are led on, whatever they post.
+  page("routes/accounts/sign-in.tsx action", "POST /sign-in", [422, 302, 302, 302, 302]),
   page("routes/accounts/join.tsx loader", "GET /join", [200, 302, 302, 302, 302]),
-  everyone("routes/accounts/join.tsx action", "POST /join", 422),
+  page("routes/accounts/join.tsx action", "POST /join", [422, 302, 302, 302, 302]),
   everyone("routes/accounts/forgot.tsx action", "POST /forgot", 422),
   everyone("routes/accounts/reset.tsx loader", "GET /reset/unknown", 200),
   everyone("routes/accounts/reset.tsx action", "POST /reset/unknown", 422),
   everyone("routes/accounts/verify.tsx loader", "GET /verify/unknown", 200),
   everyone("routes/accounts/verify.tsx action", "POST /verify/unknown", 422),
   page("routes/accounts/show.tsx loader", "GET /account", [302, 200, 200, 200, 200]),
-  everyone("routes/accounts/show.tsx action", "POST /account", 422),
+  page("routes/accounts/show.tsx action", "POST /account", [302, 422, 422, 422, 422]),
   page("routes/accounts/tokens.tsx loader", "GET /account/tokens", [302, 200, 200, 200, 200]),
-  everyone("routes/accounts/tokens.tsx action", "POST /account/tokens", 422),
+  page("routes/accounts/tokens.tsx action", "POST /account/tokens", [302, 422, 422, 422, 422]),
   page("routes/accounts/teams.tsx loader", "GET /account/teams", [302, 200, 200, 200, 200]),
-  everyone("routes/accounts/teams.tsx action", "POST /account/teams", 422),
+  page("routes/accounts/teams.tsx action", "POST /account/teams", [302, 422, 422, 422, 422]),
 
   page("routes/submissions/new.tsx loader", "GET /submit", [302, 200, 200, 200, 200]),
   page("routes/submissions/new.tsx action", "POST /submit", [302, 422, 422, 422, 422]),
@@ -90,7 +88,7 @@ export const matrix: MatrixRow[] = [
   page(
     "routes/submissions/show.tsx action",
     "POST /submissions/{listed}?withdraw",
-    [302, 422, 422, 422, 422],
+    [302, 422, 403, 403, 422],
   ),
   page(
     "routes/submissions/progress.ts loader",
@@ -108,8 +106,8 @@ export const matrix: MatrixRow[] = [
 
   everyone("routes/accounts/sign-out.ts loader", "GET /sign-out", 405),
 
-  everyone("routes/api/health.ts loader", "GET /api/v1/health", 200),
-  everyone("routes/api/ready.ts loader", "GET /api/v1/ready", 200),
+  publicRead("routes/api/health.ts loader", "GET /api/v1/health"),
+  publicRead("routes/api/ready.ts loader", "GET /api/v1/ready"),
   publicRead("routes/api/problems.ts loader", "GET /api/v1/problems"),
   publicRead("routes/api/problem.ts loader", "GET /api/v1/problems/advection-exp-sine"),
   publicRead("routes/api/problem-revision.ts loader", "GET /api/v1/problems/advection-exp-sine/revisions/1"),
@@ -172,7 +170,7 @@ export const matrix: MatrixRow[] = [
   row(
     "routes/api/withdraw.ts action",
     "POST /api/v1/submissions/{listed}/withdraw",
-    [401, 422, 422, 422, 422, 422, 422, 422, 422],
+    [401, 422, 403, 403, 422, 403, 422, 403, 422],
   ),
 
   // Last: it ends the sessions of those who call it.

@@ -8,6 +8,7 @@ const shownGrids = 3;
 
 /** The finest grids in all norms, with the order of the last pair beside the formal one. */
 export function NormsLedger({ studies, claim }: { studies: Study[]; claim: Claim }) {
+  const ordered = [...studies].sort((a, b) => rankOf(a) - rankOf(b));
   const finest = studies[0]?.points.slice(-shownGrids) ?? [];
   return (
     <Ledger caption="Errors and orders" isCaptionHidden>
@@ -30,7 +31,7 @@ export function NormsLedger({ studies, claim }: { studies: Study[]; claim: Claim
         </tr>
       </thead>
       <tbody>
-        {studies.map((study) => (
+        {ordered.map((study) => (
           <tr key={study.norm + study.measure}>
             <th scope="row">
               {normNames[study.norm]}
@@ -48,6 +49,11 @@ export function NormsLedger({ studies, claim }: { studies: Study[]; claim: Claim
       </tbody>
     </Ledger>
   );
+}
+
+/** At the nodes before between them; L1, L2, max. */
+function rankOf({ norm, measure }: Study): number {
+  return Object.keys(normNames).indexOf(norm) + (measure === "between" ? 3 : 0);
 }
 
 function orderOf(study: Study): string {

@@ -27,14 +27,14 @@ export function EvidenceLedger({ runs }: { runs: RunView[] }) {
       <tbody>
         {runs.map((run) => (
           <tr key={run.id}>
-            <th scope="row" className="fig">
+            <th scope="row" className="fig whitespace-nowrap">
               <a href={`/files/${run.id}`} download={run.file.name}>
                 {run.file.name}
               </a>
             </th>
             <td className="num">{formatNodes(run.n)}</td>
             <td className="num">{formatBytes(run.file.sizeBytes)}</td>
-            <td className="fig text-13 break-all text-ink-2">
+            <td className="fig min-w-[250px] text-13 break-all text-ink-2">
               <b className="font-semibold text-ink">{run.file.sha256.slice(0, 8)}</b>
               {run.file.sha256.slice(8)}
             </td>

@@ -15,7 +15,9 @@ export function SubmissionFacts({ submission }: { submission: SubmissionView }) 
       <p className="no">S-{number}</p>
       <Facts>
         <Fact label="State">
-          <SubmissionStateMark state={state} />
+          <span className="[&_.st]:whitespace-normal">
+            <SubmissionStateMark state={state} />
+          </span>
         </Fact>
         <Fact label="Solver">
           {solver.name}, {version.version}

@@ -17,10 +17,10 @@ export async function withdrawSubmission(
 ): Promise<{ id: string; state: SubmissionState }> {
   const account = requireVerified(viewer);
   const guarded = await findGuarded(viewer, input.id);
-  const note = requireNote(input.note);
   if (!canWithdraw(viewer, { ...guarded, state: "listed" })) {
     throw forbidden("Only the team of a record and admins can withdraw it.");
   }
+  const note = requireNote(input.note);
   return await db.transaction(async (tx) => {
     const [withdrawn] = await tx
       .update(submissions)
