@@ -8,7 +8,7 @@ import { startApplication, type Application } from "../support/application";
 import { openPage, sidewaysOverflow, startBrowser, type Watched } from "../support/browser";
 import { useDatabase } from "../support/database";
 import { mailsTo } from "../support/mails";
-import { makeAccount } from "../support/register";
+import { makeAccount, submit } from "../support/register";
 import { writeStudyFiles, type StudyFiles } from "../support/study-files";
 import { until } from "../support/until";
 
@@ -54,7 +54,7 @@ async function signIn(page: Page, address: string, secret: string): Promise<void
 }
 
 async function fillSolver(page: Page): Promise<void> {
-  await page.getByLabel("Solver", { exact: true }).fill("heron-fd2");
+  await page.getByRole("textbox", { name: "Solver", exact: true }).fill("heron-fd2");
   await page.getByLabel("Version").fill("1.4");
   await page.getByLabel("Finite difference", { exact: true }).check();
   await page.getByLabel("Method in a word").fill("central");
@@ -132,14 +132,10 @@ describe("from an author's files to a public record", () => {
     expect(await page.getByLabel("Version").inputValue()).toBe("1.4");
   });
 
-  it("what the server refuses is shown, and everything typed still stands", async () => {
+  it("an N that the file does not hold is refused beside the file", async () => {
     const { page } = author;
     await page.getByLabel("N of field-N016.npy").fill("17");
-    await page
-      .getByText(/field-N016\.npy/)
-      .first()
-      .waitFor();
-    await page.getByText(/shape/).first().waitFor();
+    await page.getByText(/The field u has shape \(16,\)/).waitFor();
     await page.getByLabel("N of field-N016.npy").fill("16");
     const send = page.getByRole("button", { name: /^Upload/ });
     await until("the files can be sent again", async () => send.isEnabled());
@@ -152,11 +148,11 @@ describe("from an author's files to a public record", () => {
     await page.waitForURL(/\/submissions\/[0-9a-f-]{36}$/);
     submissionId = new URL(page.url()).pathname.split("/").at(-1) ?? "";
     // Nothing reloads the page: the events do.
-    await page.getByText("scored, private").first().waitFor();
-    await page.getByText("confirmed").first().waitFor();
+    await page.getByText("Hand in for review").waitFor();
+    await page.getByText("confirmed", { exact: true }).waitFor();
     await page.getByText("Hand in for review").click();
     await page.getByRole("button", { name: /^Hand in S-/ }).click();
-    await page.getByText("in review").first().waitFor();
+    await page.getByText("It is in review").waitFor();
     expect(author.faults).toEqual([]);
   });
 
@@ -219,6 +215,44 @@ describe("from an author's files to a public record", () => {
 });
 
 describe("the page to hand in", () => {
+  it("keeps files and fields when the server refuses them, and shows the refusal at its field", async () => {
+    const { page } = author;
+    await open(page, "/submit?problem=advection-exp-sine");
+    await fillSolver(page);
+    await page.getByLabel("Fourier", { exact: true }).check();
+    await dropFiles(page, files.paths);
+    const send = page.getByRole("button", { name: /^Upload/ });
+    await until("the files can be sent", async () => send.isEnabled());
+    await send.click();
+    await page.getByText(/is registered with the family finiteDifference/).waitFor();
+    await page.getByText(/a solver of another family needs a slug of its own/).waitFor();
+    expect(await page.getByRole("textbox", { name: "Solver", exact: true }).inputValue()).toBe("heron-fd2");
+    expect(await page.getByLabel("N of field-N096.npy").inputValue()).toBe("96");
+    await page.getByRole("textbox", { name: "Solver", exact: true }).fill("heron-fs");
+    await send.click();
+    await page.waitForURL(/\/submissions\/[0-9a-f-]{36}$/);
+  });
+
+  it("leads to a page that names the place in a file that cannot be scored", async () => {
+    const account = await makeAccount("author", "Broken Group");
+    const { id } = await submit(account, {
+      part: {
+        problem: "advection-exp-sine",
+        solver: { team: "broken-group", solver: "nan", version: "1", family: "other", method: "none" },
+        grid: { x: { kind: "uniform-periodic" } },
+        dataLicence: "CC0-1.0",
+        runs: [{ file: "field-N032.csv", n: [32] }],
+      },
+      files: { "field-N032.csv": readFileSync(files.brokenPath) },
+    });
+    const { page } = await openPage(browser);
+    await signIn(page, account.email, "a long password");
+    await open(page, `/submissions/${id}`);
+    await page.getByText("The files cannot be scored").waitFor();
+    await page.getByText(/NaN or infinite, the first at index 5/).waitFor();
+    await page.context().close();
+  });
+
   it("does not scroll sideways on a phone, with files and a refusal in it", async () => {
     const { page, faults } = await openPage(browser, { width: 390, height: 844 });
     await signIn(page, email, password);

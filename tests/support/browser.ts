@@ -29,7 +29,7 @@ export async function openPage(
 ): Promise<Watched> {
   const context = await browser.newContext({ viewport: { width, height }, javaScriptEnabled });
   const page = await context.newPage();
-  page.setDefaultTimeout(30_000);
+  page.setDefaultTimeout(20_000);
   const faults: string[] = [];
   page.on("pageerror", (error) => faults.push(error.message));
   page.on("console", (message) => {

@@ -5,7 +5,7 @@ import { Notice } from "@/app/components/ui/notice";
 import { TextArea } from "@/app/components/ui/text-area";
 import type { SubmissionView } from "@/app/features/submissions/submission-view";
 import type { Refusal } from "../accounts/refusal";
-import { stateNames } from "../submission/submission-states";
+import { submissionStateNames } from "@/app/components/record/state-words";
 
 interface DecisionFormProps {
   submission: SubmissionView;
@@ -20,7 +20,7 @@ export function DecisionForm({ submission, refusal }: DecisionFormProps) {
     return (
       <Notice>
         {state !== "inReview"
-          ? `There is nothing to decide: the submission is ${stateNames[state]}.`
+          ? `There is nothing to decide: the submission is ${submissionStateNames[state]}.`
           : "The submission is your own team's. Another admin has to decide about it."}
       </Notice>
     );

@@ -2,7 +2,7 @@ import { Form, useSubmit } from "react-router";
 import { Button } from "@/app/components/ui/button";
 import { Select } from "@/app/components/ui/select";
 import { noFinding, type ModerationQuery } from "@/app/features/moderation/moderation-query";
-import { findingName } from "../submission/finding-names";
+import { findingName } from "./finding-names";
 
 /** Filters as soon as a finding is chosen; without a script by the button. */
 export function FindingFilter({ query, codes }: { query: ModerationQuery; codes: string[] }) {

@@ -1,9 +1,9 @@
+import { normNames } from "@/app/components/instrument/ranking-words";
 import { formatError, formatNodes } from "@/app/components/ui/figures";
 import { Ledger } from "@/app/components/ui/ledger";
 import type { Claim } from "@/benchmarks/scoring/declaration";
-import type { RelativeNormName, Study } from "@/benchmarks/scoring/result";
+import type { Study } from "@/benchmarks/scoring/result";
 
-const normNames: Record<RelativeNormName, string> = { relL1: "L1", relL2: "L2", relMax: "max" };
 const shownGrids = 3;
 
 /** The finest grids in all norms, with the order of the last pair beside the formal one. */

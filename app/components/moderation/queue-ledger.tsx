@@ -6,7 +6,7 @@ import { StateMark } from "@/app/components/ui/state-mark";
 import type { ModerationItem } from "@/app/features/moderation/moderation-view";
 import type { ModerationTab } from "@/app/features/moderation/moderation-query";
 import { observedSentence } from "../submission/observed-sentence";
-import { findingName } from "../submission/finding-names";
+import { findingName } from "./finding-names";
 import { useQueueKeys } from "./use-queue-keys";
 import { waitingTime } from "./waiting-time";
 

@@ -1,20 +1,21 @@
 import { useRef } from "react";
 import { Link } from "react-router";
 import type { Drawings } from "@/app/components/charts/drawings";
+import { EvidenceLedger } from "@/app/components/record/evidence-ledger";
+import { EvidenceSummary } from "@/app/components/record/evidence-summary";
+import { FindingsList } from "@/app/components/record/findings-list";
+import { StudyLedger } from "@/app/components/record/study-ledger";
 import { FamilyMark } from "@/app/components/ui/family-mark";
 import { formatDay, formatRecordNumber } from "@/app/components/ui/figures";
 import { RefusalBox } from "@/app/components/ui/refusal-box";
 import type { SubmissionView } from "@/app/features/submissions/submission-view";
 import type { Refusal } from "../accounts/refusal";
 import { DecisionHistory } from "../submission/decision-history";
-import { EvidenceLedger } from "../submission/evidence-ledger";
-import { FindingsList } from "../submission/findings-list";
 import { observedSentence } from "../submission/observed-sentence";
 import { outputTimeOf } from "../submission/output-time";
-import { RunsLedger } from "../submission/runs-ledger";
 import { Section } from "../submission/section";
 import { StudyChart } from "../submission/study-chart";
-import { SubmissionStateMark } from "../submission/submission-states";
+import { SubmissionStateMark } from "../submission/submission-state-mark";
 import { DecisionForm } from "./decision-form";
 import { NormsLedger } from "./norms-ledger";
 import { SameFiles } from "./same-files";
@@ -69,10 +70,11 @@ export function ReviewPage({ submission, drawings, neighbours, refusal }: Review
         <SameFiles findings={findings} />
       </Section>
       <Section id="runs" title="Runs">
-        <RunsLedger runs={runs} study={study} />
+        <StudyLedger view={submission} />
       </Section>
       <Section id="evidence" title="Evidence">
         <EvidenceLedger runs={runs} />
+        <EvidenceSummary view={submission} />
       </Section>
       {decisions.length > 0 ? (
         <Section id="decisions" title="Decisions so far">

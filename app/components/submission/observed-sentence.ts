@@ -1,15 +1,5 @@
+import { kindNames, verdictNames } from "@/app/components/instrument/ranking-words";
 import type { SubmissionSummary } from "@/app/features/submissions/submission-view";
-import type { Verdict } from "@/benchmarks/scoring/result";
-
-export const verdictNames: Record<Verdict, string> = {
-  confirmed: "confirmed",
-  near: "near",
-  below: "below",
-  above: "above",
-  notExponential: "not exponential",
-  undecidable: "undecidable",
-  none: "no claim",
-};
 
 /** "algebraic, order 4.00, verdict confirmed". */
 export function observedSentence({
@@ -24,6 +14,5 @@ export function observedSentence({
       : rate !== null
         ? `rate ${rate.toPrecision(3)} a node`
         : null;
-  const kindText = kind === "none" ? "no kind of convergence" : kind;
-  return [kindText, figure, `verdict ${verdictNames[verdict]}`].filter(Boolean).join(", ");
+  return [kindNames[kind], figure, `verdict ${verdictNames[verdict]}`].filter(Boolean).join(", ");
 }

@@ -1,20 +1,23 @@
 import type { Drawings } from "@/app/components/charts/drawings";
 import { Sheet } from "@/app/components/layout/sheet";
+import { EvidenceLedger } from "@/app/components/record/evidence-ledger";
+import { EvidenceSummary } from "@/app/components/record/evidence-summary";
+import { FindingsList } from "@/app/components/record/findings-list";
+import { GridConvergenceTable } from "@/app/components/record/grid-convergence-table";
+import { RecordFacts } from "@/app/components/record/record-facts";
+import { StudyLedger } from "@/app/components/record/study-ledger";
+import { VerdictPlate } from "@/app/components/record/verdict-plate";
 import { RefusalBox } from "@/app/components/ui/refusal-box";
 import type { SubmissionView } from "@/app/features/submissions/submission-view";
 import type { Refusal } from "../accounts/refusal";
 import { DecisionHistory } from "./decision-history";
-import { EvidenceLedger } from "./evidence-ledger";
-import { FindingsList } from "./findings-list";
 import { HandInForm } from "./hand-in-form";
 import { outputTimeOf } from "./output-time";
 import { ProgressPanel } from "./progress-panel";
-import { RunsLedger } from "./runs-ledger";
+import { RunStates } from "./run-states";
 import { Section } from "./section";
 import { StudyChart } from "./study-chart";
-import { SubmissionFacts } from "./submission-facts";
 import { useProgress } from "./use-progress";
-import { VerdictPlate } from "./verdict-plate";
 
 interface SubmissionPageProps {
   submission: SubmissionView;
@@ -22,7 +25,7 @@ interface SubmissionPageProps {
   refusal: Refusal | undefined;
 }
 
-/** A submission before it is listed. */
+/** A submission before it is listed: the record that it may become, and what there is to do. */
 export function SubmissionPage({ submission, drawings, refusal }: SubmissionPageProps) {
   const { id, state, runs, study, problem, solver, version, decisions, refusals } = submission;
   const count = (runState: string) => runs.filter((run) => run.state === runState).length;
@@ -33,31 +36,48 @@ export function SubmissionPage({ submission, drawings, refusal }: SubmissionPage
     refused: count("refused"),
   });
   return (
-    <Sheet margin={<SubmissionFacts submission={submission} />}>
-      <div className="grid items-start gap-x-11 gap-y-6 lg:grid-cols-[minmax(0,1fr)_minmax(0,440px)]">
-        <div>
-          <h1 className="mb-3 text-34">
-            <span className="fig">{solver.name}</span> on{" "}
-            <a href={`/problems/${problem.slug}`}>{problem.title}</a>
-          </h1>
-          {version.description ? <p className="prose mb-4">{version.description}</p> : null}
-          <ProgressPanel progress={progress} />
-          {state === "failed" ? (
-            <p className="prose mb-2">
-              The files cannot be scored. What is wrong stands below, each with its place; mend the files and{" "}
-              <a href={`/submit?problem=${problem.slug}`}>send the study again</a>.
-            </p>
-          ) : null}
-          <RefusalBox refusals={refusals} />
-          <DecisionHistory decisions={decisions} />
-          <div className="mt-5">
-            <HandInForm submission={submission} refusal={refusal} />
+    <>
+      <p className="crumb">
+        <a href="/submissions">Submissions</a>,{" "}
+        <a href={`/problems/${problem.slug}`}>
+          {problem.code} {problem.title}
+        </a>
+      </p>
+      <Sheet className="!pt-0" margin={<RecordFacts view={submission} />}>
+        <div className="ttl rec">
+          <div>
+            <h1>
+              <code>{solver.slug}</code> on {problem.title}
+            </h1>
+            {version.description ? (
+              <div className="prose">
+                <p>{version.description}</p>
+              </div>
+            ) : null}
+            <ProgressPanel progress={progress} />
+            {state === "failed" ? <FailedNote slug={problem.slug} /> : null}
+            <RefusalBox refusals={refusals} />
+            <DecisionHistory decisions={decisions} />
+            <div className="mt-6">
+              <HandInForm submission={submission} refusal={refusal} />
+            </div>
           </div>
+          {study ? <VerdictPlate study={study} claim={submission.declaration.claim} /> : null}
         </div>
-        {study ? <VerdictPlate study={study} claim={submission.declaration.claim} /> : null}
-      </div>
+      </Sheet>
       <SubmissionFigures submission={submission} drawings={drawings} />
-    </Sheet>
+    </>
+  );
+}
+
+function FailedNote({ slug }: { slug: string }) {
+  return (
+    <div className="prose">
+      <p>
+        The files cannot be scored. What is wrong stands below, each with its place; mend the files and{" "}
+        <a href={`/submit?problem=${slug}`}>send the study again</a>.
+      </p>
+    </div>
   );
 }
 
@@ -65,21 +85,32 @@ function SubmissionFigures({ submission, drawings }: Omit<SubmissionPageProps, "
   const { runs, study, studies, family, findings, scorerVersion } = submission;
   return (
     <>
-      <div className="grid items-start gap-x-11 xl:grid-cols-2">
-        <Section id="study" title="Refinement study">
-          <RunsLedger runs={runs} study={study} />
-        </Section>
-        {study ? (
-          <Section id="convergence" title="Convergence">
+      {study ? (
+        <div className="two study pt-6">
+          <section aria-labelledby="study-heading">
+            <h2 id="study-heading" className="mb-2.5 text-20">
+              Refinement study
+            </h2>
+            <StudyLedger view={submission} />
+            <GridConvergenceTable study={study} />
+          </section>
+          <section aria-labelledby="chart-heading">
+            <h2 id="chart-heading" className="text-20">
+              Convergence
+            </h2>
             <StudyChart
               studies={studies}
               family={family}
               outputTime={outputTimeOf(submission)}
               drawings={drawings}
             />
-          </Section>
-        ) : null}
-      </div>
+          </section>
+        </div>
+      ) : (
+        <Section id="runs" title="Runs">
+          <RunStates runs={runs} />
+        </Section>
+      )}
       {scorerVersion ? (
         <Section id="findings" title="Findings">
           <FindingsList findings={findings} />
@@ -87,6 +118,7 @@ function SubmissionFigures({ submission, drawings }: Omit<SubmissionPageProps, "
       ) : null}
       <Section id="evidence" title="Evidence">
         <EvidenceLedger runs={runs} />
+        <EvidenceSummary view={submission} />
       </Section>
     </>
   );

@@ -5,7 +5,7 @@ import { formatDay, formatRecordNumber } from "@/app/components/ui/figures";
 import { Ledger } from "@/app/components/ui/ledger";
 import type { SubmissionSummary } from "@/app/features/submissions/submission-view";
 import { observedSentence } from "./observed-sentence";
-import { SubmissionStateMark } from "./submission-states";
+import { SubmissionStateMark } from "./submission-state-mark";
 
 interface SubmissionsLedgerProps {
   submissions: SubmissionSummary[];

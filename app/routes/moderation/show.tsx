@@ -1,7 +1,7 @@
 import { redirect } from "react-router";
 import type { TitleBlockEntry } from "@/app/components/layout/title-block";
 import { ReviewPage } from "@/app/components/moderation/review-page";
-import { drawStudy } from "@/app/components/submission/draw-study.server";
+import { drawSubmission } from "@/app/components/submission/draw-submission.server";
 import { requireRole } from "@/app/features/accounts/viewer-policy";
 import { decisionBody } from "@/app/features/moderation/decision-form";
 import { listQueue } from "@/app/features/moderation/list-queue.server";
@@ -28,7 +28,11 @@ export async function loader({ request, params, context }: Route.LoaderArgs) {
     const viewer = context.get(viewerContext);
     requireRole(viewer, "admin");
     const [submission, queue] = await Promise.all([getSubmission(viewer, params.id), listQueue(viewer)]);
-    return { submission, drawings: await drawStudy(submission), neighbours: neighboursOf(queue, params.id) };
+    return {
+      submission,
+      drawings: await drawSubmission(submission),
+      neighbours: neighboursOf(queue, params.id),
+    };
   });
 }
 

@@ -82,6 +82,9 @@ export default function RecordShow({ loaderData }: Route.ComponentProps) {
               <a className="btn" href="#evidence">
                 Download files
               </a>
+              {view.permissions.canWithdraw ? (
+                <a href={`/submissions/${view.id}?withdraw`}>Withdraw</a>
+              ) : null}
             </div>
           </div>
           {view.study ? <VerdictPlate study={view.study} claim={view.declaration.claim} /> : null}

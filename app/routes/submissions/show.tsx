@@ -1,7 +1,7 @@
 import { redirect } from "react-router";
 import { z } from "zod";
 import type { TitleBlockEntry } from "@/app/components/layout/title-block";
-import { drawStudy } from "@/app/components/submission/draw-study.server";
+import { drawSubmission } from "@/app/components/submission/draw-submission.server";
 import { SubmissionPage } from "@/app/components/submission/submission-page";
 import { WithdrawPage } from "@/app/components/submission/withdraw-page";
 import { decisionBody } from "@/app/features/moderation/decision-form";
@@ -32,7 +32,7 @@ export async function loader({ request, params, context }: Route.LoaderArgs) {
     if (submission.record && !isWithdrawing) {
       throw redirect(`/records/${submission.record.number}/${submission.record.version}`);
     }
-    return { submission, isWithdrawing, drawings: await drawStudy(submission) };
+    return { submission, isWithdrawing, drawings: await drawSubmission(submission) };
   });
 }
 
