@@ -39,7 +39,7 @@ export const displayFont = "var(--f-display)";
 export const chartConfig = {
   aria: false,
   background: "transparent",
-  view: { fill: "var(--sheet)", stroke: "var(--rule)", strokeWidth: 1 },
+  view: { fill: "var(--sheet)", stroke: "transparent" },
   axis: {
     domain: false,
     ticks: false,

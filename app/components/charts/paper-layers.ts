@@ -94,6 +94,11 @@ export function paperLayers(frame: ChartFrame): Layer[] {
       mark: { type: "rule", ...fine },
       encoding: { x: { value: 0 }, x2: { value: frame.width } },
     },
+    {
+      data: { values: [{}] },
+      mark: { type: "rect", fill: "transparent", stroke: "var(--rule)", strokeWidth: 1 },
+      encoding: { x: { value: 0 }, x2: { value: frame.width }, y: { value: 0 }, y2: { value: frame.height } },
+    },
     ...staffLayers(frame),
   ];
 }

@@ -33,7 +33,7 @@ export function WhoCells({ row, tolerance }: CellProps) {
         </span>
         {row.precision === "float32" ? <span className="prec">single</span> : null}
       </th>
-      <td className="tm" role="cell">
+      <td className="tm" role="cell" title={row.team.name}>
         {row.team.name}
       </td>
     </>
@@ -45,7 +45,7 @@ export function HowWellCells({ row, tolerance }: CellProps) {
   const observed = observedOf(row.observed);
   return (
     <>
-      <td className="mt" role="cell">
+      <td className="mt" role="cell" title={row.method}>
         {row.method}
       </td>
       <td className="fo num" role="cell">

@@ -2,6 +2,7 @@ import type { CSSProperties } from "react";
 import { FamilyGlyph } from "@/app/components/ui/family-mark";
 import { formatCount, formatTotalNodes } from "@/app/components/ui/figures";
 import type { RankingRow } from "@/app/features/rankings/ranking";
+import { percentOf } from "./percent";
 import { HowWellCells, WhoCells } from "./ranking-cells";
 
 interface RankingLineProps {
@@ -38,7 +39,7 @@ export function RankingLine({ row, place, index, tolerance }: RankingLineProps) 
 }
 
 function Track({ row, place, index }: Omit<RankingLineProps, "tolerance">) {
-  const x = `${Math.round(1e4 * place) / 100}%`;
+  const x = percentOf(place);
   const isRight = place < 0.62;
   const said =
     row.n.length > 1 ? formatTotalNodes(row.n) : row.atMost ? "at most: below on the coarsest grid" : null;

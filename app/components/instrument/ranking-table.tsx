@@ -9,6 +9,7 @@ import {
 import { formatTolerance } from "@/app/components/ui/figures";
 import type { Ranking } from "@/app/features/rankings/ranking";
 import { NotReachedLine } from "./not-reached-line";
+import { percentOf } from "./percent";
 import { readingPlace } from "./ranking-chart";
 import { RankingLine } from "./ranking-line";
 
@@ -24,7 +25,7 @@ export function RankingTable({ ranking, scales }: RankingTableProps) {
     nodesShare(scales, readingPlace(row, curves.get(row.submissionId), ranking.tolerance)),
   );
   const tolerance = formatTolerance(ranking.tolerance);
-  const line = { "--fy": errorShare(scales, ranking.tolerance) } as CSSProperties;
+  const line = { "--fy": errorShare(scales, ranking.tolerance).toFixed(5) } as CSSProperties;
   return (
     <table className="rank" role="table" style={line}>
       <caption className="sr-only">
@@ -121,11 +122,11 @@ function NodesScale({ scales, places }: { scales: FrameScales; places: number[] 
   return (
     <svg height="22" width="100%" aria-hidden="true">
       {places.map((place, index) => (
-        <line key={index} className="plumb" x1={`${100 * place}%`} x2={`${100 * place}%`} y1="-16" y2="32" />
+        <line key={index} className="plumb" x1={percentOf(place)} x2={percentOf(place)} y1="-16" y2="32" />
       ))}
       {ticks.map((n) => {
         const share = nodesShare(scales, n);
-        const x = `${100 * share}%`;
+        const x = percentOf(share);
         return (
           <g key={n}>
             <line x1={x} x2={x} y1="16" y2="22" stroke="var(--ink-3)" />

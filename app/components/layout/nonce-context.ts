@@ -1,4 +1,4 @@
 import { createContext } from "react";
 
-/** The nonce of the answer being written; empty in the browser, which hides nonces from scripts. */
+/** The nonce of the answer that the page came with. */
 export const NonceContext = createContext("");

@@ -1,11 +1,10 @@
-import { ButtonLink } from "@/app/components/ui/button";
 import { Ledger } from "@/app/components/ui/ledger";
 import type { ProblemDefinition } from "@/benchmarks/problems/definition";
 
 type GuidedProblem = Pick<ProblemDefinition, "axes" | "fields" | "grids" | "notes" | "outputTimes">;
 
 /** What a submission to this problem consists of. */
-export function HandInGuide({ problem, slug }: { problem: GuidedProblem; slug: string }) {
+export function HandInGuide({ problem }: { problem: GuidedProblem }) {
   const { axes, fields, grids, outputTimes } = problem;
   const scored = fields.filter((field) => field.isScored).map((field) => field.name);
   const shape = axes.map((axis) => `N${axes.length > 1 ? axis.name : ""}`).join(", ");
@@ -52,7 +51,6 @@ export function HandInGuide({ problem, slug }: { problem: GuidedProblem; slug: s
               {note}
             </p>
           ))}
-          <ButtonLink href={`/submit?problem=${slug}`}>Hand in a refinement study</ButtonLink>
         </div>
       </div>
     </section>

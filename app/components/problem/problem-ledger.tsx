@@ -41,14 +41,14 @@ export function ProblemLedger({ id, title, remark, problems }: ProblemLedgerProp
               <th scope="col" className="w-14">
                 Code
               </th>
-              <th scope="col" className="w-[32%]">
+              <th scope="col" className="w-[26%]">
                 Test problem
               </th>
-              <th scope="col" className="eqh">
+              <th scope="col" className="eqh w-[25%]">
                 Equation
               </th>
               <th scope="col">Domain and boundary conditions</th>
-              <th scope="col" className="w-34">
+              <th scope="col" className="w-32">
                 Families with records
               </th>
               <th scope="col" className="num tolfig w-28">
@@ -101,7 +101,7 @@ function ProblemLine({ problem }: { problem: CatalogueLine }) {
         {best ? (
           `${best.atMost ? "≤ " : ""}${formatCount(best.nodes)}`
         ) : (
-          <span className="nil">none reaches</span>
+          <span className="nil">{records > 0 ? "none reaches" : "—"}</span>
         )}
       </td>
       <td className="num rec">{records}</td>

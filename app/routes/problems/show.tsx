@@ -90,7 +90,7 @@ export default function ProblemShow({ loaderData }: Route.ComponentProps) {
           </p>
         </div>
       </div>
-      <HandInGuide problem={page.definition} slug={page.slug} />
+      <HandInGuide problem={page.definition} />
       <RevisionLedger slug={page.slug} revisions={page.revisions} />
     </>
   );
